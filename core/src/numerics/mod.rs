@@ -1,0 +1,1 @@
+//! Numbers without meaning: no domain words in here.

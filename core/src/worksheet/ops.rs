@@ -1,0 +1,31 @@
+//! The functions that formulas may use: from `libm`, so that every device gives the same digits.
+
+/// Square root (correctly rounded everywhere).
+#[must_use]
+pub fn sqrt(x: f64) -> f64 {
+    libm::sqrt(x)
+}
+
+/// `x` to the power `y`.
+#[must_use]
+pub fn pow(x: f64, y: f64) -> f64 {
+    libm::pow(x, y)
+}
+
+/// The smaller of two.
+#[must_use]
+pub fn min(a: f64, b: f64) -> f64 {
+    libm::fmin(a, b)
+}
+
+/// The larger of two.
+#[must_use]
+pub fn max(a: f64, b: f64) -> f64 {
+    libm::fmax(a, b)
+}
+
+/// Tangent of an angle in degrees.
+#[must_use]
+pub fn tan_deg(x: f64) -> f64 {
+    libm::tan(x.to_radians())
+}

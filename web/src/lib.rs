@@ -1,0 +1,1 @@
+//! The open book: pages as slots, drawings as data.

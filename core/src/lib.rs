@@ -6,8 +6,12 @@
 //! source, so that the same book gives the same answer on every device.
 #![forbid(unsafe_code)]
 
+pub mod bridge;
+pub mod check;
+pub mod material;
 pub mod numerics;
 pub mod problem;
 pub mod quantity;
+pub mod section;
 pub mod units;
 pub mod worksheet;

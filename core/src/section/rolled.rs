@@ -1,0 +1,1 @@
+//! Rolled I-shapes.

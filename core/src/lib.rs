@@ -12,6 +12,7 @@ pub mod material;
 pub mod numerics;
 pub mod problem;
 pub mod quantity;
+pub mod rating;
 pub mod section;
 pub mod units;
 pub mod worksheet;

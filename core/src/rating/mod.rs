@@ -1,0 +1,13 @@
+//! From a bridge and a rule set to the rating: effects, capacities, their combination, what
+//! governs, and the posting.
+//!
+//! Three pure stages: effects of each vehicle for a whole lane, capacity of each girder at each
+//! station, and their combination. The check that somebody opens is worked again on a sheet by the
+//! same functions.
+
+pub mod result;
+
+pub use result::{
+    Capacity, Check, Class, DeadEffects, Factors, Key, Limit, LineSummary, LiveLoad, Posting, Rating,
+    SafeLoad, Sign, SignUnit, VehicleResult,
+};

@@ -60,7 +60,7 @@ pub enum Class {
 }
 
 /// Names a check: stable between ratings of the same book.
-#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+#[derive(Clone, Copy, Debug, PartialEq)]
 pub struct Key {
     /// Index of the girder line.
     pub line: usize,

@@ -7,7 +7,5 @@
 
 pub mod result;
 
-pub use result::{
-    Capacity, Check, Class, DeadEffects, Factors, Key, Limit, LineSummary, LiveLoad, Posting, Rating,
-    SafeLoad, Sign, SignUnit, VehicleResult,
-};
+pub use crate::check::{Class, Limit, Posting, SafeLoad, Sign, SignUnit};
+pub use result::{Capacity, Check, DeadEffects, Factors, Key, LineSummary, LiveLoad, Rating, VehicleResult};

@@ -1,6 +1,6 @@
 //! What a rating holds: every check, what governs, and the posting.
 
-use crate::check::{Action, Level, LimitState, Outcome};
+use crate::check::{Action, Class, Level, LimitState, Outcome, Posting};
 use crate::problem::Problem;
 use crate::quantity::{Force, Length, LineLoad};
 
@@ -44,19 +44,6 @@ pub struct LiveLoad {
     pub weight: Option<Force>,
     /// Whether it is a single unit, a combination or a design load: signs differ.
     pub class: Class,
-}
-
-/// What kind of vehicle, as signs tell them apart.
-#[derive(Clone, Copy, Debug, PartialEq, Eq)]
-pub enum Class {
-    /// A notional design load.
-    Design,
-    /// A single-unit truck.
-    SingleUnit,
-    /// A truck and trailer or semitrailer.
-    Combination,
-    /// A vehicle of the user's own.
-    Own,
 }
 
 /// Names a check: stable between ratings of the same book.
@@ -178,67 +165,4 @@ pub struct VehicleResult {
     /// The vehicle's gross weight times the ruling factor, rounded down nowhere; none for design
     /// loads and where there is no factor.
     pub rating_weight: Option<Force>,
-}
-
-/// Whether it must be posted, and how.
-#[derive(Clone, Debug, PartialEq)]
-pub struct Posting {
-    /// Whether any vehicle needs a limit, none is rated, or the bridge should be closed.
-    pub sign: Sign,
-    /// One entry a legal vehicle.
-    pub safe: Vec<SafeLoad>,
-}
-
-/// The sign that follows.
-#[derive(Clone, Copy, Debug, PartialEq)]
-pub enum Sign {
-    /// Every legal vehicle passes.
-    None,
-    /// Limits for single units and combinations, in the sign's own unit, rounded down; `None`
-    /// where that class needs no limit.
-    Limit {
-        /// For single-unit trucks.
-        single_unit: Option<u32>,
-        /// For combinations.
-        combination: Option<u32>,
-        /// The unit of both figures.
-        unit: SignUnit,
-    },
-    /// Below the least limit that a bridge may stay open with, or no vehicle type allowed: close.
-    Close,
-    /// No answer: something that has to be rated got no number.
-    NotKnown,
-}
-
-/// Unit on a sign.
-#[derive(Clone, Copy, Debug, PartialEq, Eq)]
-pub enum SignUnit {
-    /// Short tons of 2,000 lb.
-    ShortTons,
-    /// Tonnes.
-    Tonnes,
-}
-
-/// The safe load of one vehicle type.
-#[derive(Clone, Debug, PartialEq)]
-pub struct SafeLoad {
-    /// Index into [`Rating::loads`].
-    pub load: usize,
-    /// Ruling factor, where there is one.
-    pub factor: Option<f64>,
-    /// What follows.
-    pub limit: Limit,
-}
-
-/// What follows for one vehicle type.
-#[derive(Clone, Copy, Debug, PartialEq)]
-pub enum Limit {
-    /// It passes at its full weight.
-    Full,
-    /// Up to this weight (not rounded).
-    Weight(Force),
-    /// Not allowed at all.
-    NotAllowed,
-    /// No number.
-    NotKnown,
 }

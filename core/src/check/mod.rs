@@ -1,7 +1,11 @@
 //! One check: a member at a station, asked for one action at one limit state by one vehicle at one
 //! level, and what comes out of it.
 
+mod posting;
+
 use crate::problem::Problem;
+
+pub use posting::{Class, Limit, Posting, SafeLoad, Sign, SignUnit};
 
 /// What a girder is asked for.
 #[derive(Clone, Copy, Debug, PartialEq, Eq, PartialOrd, Ord)]

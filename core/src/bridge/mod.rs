@@ -4,6 +4,7 @@
 //! Across the deck, `y` runs from the left edge to the right, looking ahead; along it, `x` runs from
 //! the centre of the bearings at the near support.
 
+mod at;
 pub mod deck;
 pub mod finding;
 pub mod member;

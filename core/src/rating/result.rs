@@ -61,14 +61,21 @@ pub struct Key {
     pub load: usize,
 }
 
-/// One check with what went into it. Effects and capacity are of the action's own quantity, in the
-/// base unit of [`crate::quantity`] (moment, force or stress).
+/// One check with what went into it.
 #[derive(Clone, Debug, PartialEq)]
 pub struct Check {
     /// Which one.
     pub key: Key,
     /// What comes out.
     pub outcome: Outcome,
+    /// What went into it; none where the outcome is `NotRated`.
+    pub figures: Option<Figures>,
+}
+
+/// The figures of a check. Effects and capacity are of the action's own quantity, in the base unit
+/// of [`crate::quantity`] (moment, force or stress).
+#[derive(Clone, Copy, Debug, PartialEq)]
+pub struct Figures {
     /// Capacity with all its factors.
     pub capacity: f64,
     /// Dead load effects, without load factors.

@@ -6,6 +6,9 @@
 //! source, so that the same book gives the same answer on every device.
 #![forbid(unsafe_code)]
 
+pub mod influence;
+pub mod load;
+pub mod moving;
 pub mod numerics;
 pub mod problem;
 pub mod quantity;

@@ -8,7 +8,10 @@
 
 pub mod bridge;
 pub mod check;
+pub mod influence;
+pub mod load;
 pub mod material;
+pub mod moving;
 pub mod numerics;
 pub mod problem;
 pub mod quantity;

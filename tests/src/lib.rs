@@ -1,1 +1,3 @@
 //! Helpers of the tests: reading reference data.
+
+pub mod vehicles;

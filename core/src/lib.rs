@@ -8,10 +8,12 @@
 
 pub mod bridge;
 pub mod check;
+pub mod clauses;
 pub mod material;
 pub mod numerics;
 pub mod problem;
 pub mod quantity;
+pub mod resistance;
 pub mod section;
 pub mod units;
 pub mod worksheet;

@@ -1,1 +1,3 @@
-//! Helpers of the tests: reading reference data.
+//! Helpers of the tests: reading reference data, evaluating formulas independently.
+
+pub mod evaluate;

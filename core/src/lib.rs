@@ -8,6 +8,7 @@
 
 pub mod bridge;
 pub mod check;
+pub mod clauses;
 pub mod influence;
 pub mod load;
 pub mod material;
@@ -16,6 +17,7 @@ pub mod numerics;
 pub mod problem;
 pub mod quantity;
 pub mod rating;
+pub mod resistance;
 pub mod section;
 pub mod units;
 pub mod worksheet;

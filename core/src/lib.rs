@@ -8,6 +8,8 @@
 
 pub mod bridge;
 pub mod check;
+pub mod document;
+pub mod limits;
 pub mod material;
 pub mod numerics;
 pub mod problem;

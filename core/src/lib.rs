@@ -6,6 +6,7 @@
 //! source, so that the same book gives the same answer on every device.
 #![forbid(unsafe_code)]
 
+pub mod basis;
 pub mod bridge;
 pub mod check;
 pub mod clauses;
@@ -21,5 +22,6 @@ pub mod quantity;
 pub mod rating;
 pub mod resistance;
 pub mod section;
+pub mod share;
 pub mod units;
 pub mod worksheet;

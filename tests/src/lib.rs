@@ -1,3 +1,4 @@
-//! Helpers of the tests: reading reference data, evaluating formulas independently.
+//! Helpers of the tests: evaluating formulas independently, sections made of plates.
 
 pub mod evaluate;
+pub mod steel;

@@ -1,4 +1,5 @@
 //! Helpers of the tests: reading reference data, evaluating formulas independently, vehicle tables.
 
 pub mod evaluate;
+pub mod steel;
 pub mod vehicles;

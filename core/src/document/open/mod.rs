@@ -13,7 +13,7 @@ mod site;
 mod traffic;
 
 use super::book::{Book, ServicePosting, SignUnit};
-use super::fields;
+use super::fields::Order;
 use crate::bridge::{self, Bridge};
 use crate::problem::Problem;
 use crate::quantity::Stress;
@@ -87,8 +87,9 @@ pub fn bridge(book: &Book, defaults: &dyn Defaults) -> Opened {
         },
     };
     let Reader { mut problems, mut filled, .. } = reader;
-    problems.sort_by_key(|problem| fields::rank(book, &problem.path));
-    filled.sort_by_key(|filled| fields::rank(book, &filled.path));
+    let order = Order::of(book);
+    problems.sort_by_cached_key(|problem| order.rank(&problem.path));
+    filled.sort_by_cached_key(|filled| order.rank(&filled.path));
     let blocked = problems.iter().any(Problem::blocks);
     let bridge = (|| {
         Some(Bridge {

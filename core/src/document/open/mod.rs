@@ -65,8 +65,8 @@ pub struct Filled {
 #[must_use]
 pub fn bridge(book: &Book, defaults: &dyn Defaults) -> Opened {
     let mut reader = Reader::new(book);
-    let site = site::site(&mut reader);
-    let year = site.as_ref().and_then(|site| site.year_built);
+    let year = site::year(&mut reader);
+    let site = site::site(&mut reader, year);
     let span = girders::span(&mut reader);
     let skew = reader.needed("skew", "enter 0 if the supports are square to the road");
     let members = member::members(&mut reader, year, defaults);
@@ -86,6 +86,7 @@ pub fn bridge(book: &Book, defaults: &dyn Defaults) -> Opened {
             ServicePosting::No => Some(false),
         },
     };
+    reader.tell_year();
     let Reader { mut problems, mut filled, .. } = reader;
     let order = Order::of(book);
     problems.sort_by_cached_key(|problem| order.rank(&problem.path));

@@ -322,7 +322,7 @@ fn moves() -> impl Strategy<Value = Move> {
 }
 
 struct Nothing;
-impl document::Defaults for Nothing {
+impl girderbook_core::material::Defaults for Nothing {
     fn yield_strength(&self, _: Option<i32>) -> Option<(girderbook_core::quantity::Stress, &'static str)> {
         None
     }

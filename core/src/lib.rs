@@ -13,6 +13,7 @@ pub mod numerics;
 pub mod problem;
 pub mod quantity;
 pub mod rating;
+pub mod report;
 pub mod section;
 pub mod units;
 pub mod worksheet;

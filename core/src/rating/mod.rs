@@ -8,4 +8,6 @@
 pub mod result;
 
 pub use crate::check::{Class, Limit, Posting, SafeLoad, Sign, SignUnit};
-pub use result::{Capacity, Check, DeadEffects, Factors, Figures, Key, LineSummary, LiveLoad, Rating, VehicleResult};
+pub use result::{
+    Capacity, Check, DeadEffects, Factors, Figures, Key, LineSummary, LiveLoad, Rating, VehicleResult,
+};

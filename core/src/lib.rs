@@ -8,12 +8,17 @@
 
 pub mod bridge;
 pub mod check;
+pub mod clauses;
+pub mod influence;
+pub mod load;
 pub mod material;
+pub mod moving;
 pub mod numerics;
 pub mod problem;
 pub mod quantity;
 pub mod rating;
 pub mod report;
+pub mod resistance;
 pub mod section;
 pub mod units;
 pub mod worksheet;

@@ -35,7 +35,7 @@ macro_rules! clause {
         ) -> $crate::worksheet::Val<$out> {
             #[allow(unused_imports, clippy::too_many_arguments)]
             fn eval($($in: f64),*) -> f64 {
-                use $crate::worksheet::ops::{max, min, pow, sqrt, tan_deg};
+                use $crate::worksheet::ops::{PI, max, min, pow, sqrt, tan_deg};
                 $body
             }
             static CLAUSE: $crate::worksheet::Clause = $crate::worksheet::Clause {
@@ -83,7 +83,7 @@ macro_rules! condition {
         ) -> bool {
             #[allow(unused_imports)]
             fn eval($($in: f64),*) -> bool {
-                use $crate::worksheet::ops::{max, min, pow, sqrt, tan_deg};
+                use $crate::worksheet::ops::{PI, max, min, pow, sqrt, tan_deg};
                 $body
             }
             static CLAUSE: $crate::worksheet::Clause = $crate::worksheet::Clause {

@@ -1,5 +1,8 @@
 //! The functions that formulas may use: from `libm`, so that every device gives the same digits.
 
+/// The ratio of a circle's circumference to its diameter.
+pub use core::f64::consts::PI;
+
 /// Square root (correctly rounded everywhere).
 #[must_use]
 pub fn sqrt(x: f64) -> f64 {

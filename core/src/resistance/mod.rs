@@ -1,0 +1,1 @@
+//! Mechanics of resistance without coefficients of any code.

@@ -1,1 +1,0 @@
-//! Rolled I-shapes.

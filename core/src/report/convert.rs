@@ -37,6 +37,12 @@ fn known(unit: &str, dimension: Dimension) -> Option<(f64, System)> {
     }
 }
 
+/// A value of [`Quantity::base`] as a figure in a unit; a number that has no unit stays as it is.
+#[must_use]
+pub(super) fn in_unit(base: f64, dimension: Dimension, unit: &str) -> f64 {
+    known(unit, dimension).map_or(base, |(per, _)| base / per)
+}
+
 /// A figure in the unit that the book has for it, where that is another one than `unit`. A length
 /// stays long or small.
 #[must_use]

@@ -9,6 +9,12 @@ pub const DIGITS: usize = 5;
 /// are never rounded away below ten million; beyond that, and below 0.001, powers of ten stand.
 #[must_use]
 pub fn figure(value: f64) -> String {
+    figure_of(value, DIGITS)
+}
+
+/// The same with another number of significant digits, one at least.
+#[must_use]
+pub fn figure_of(value: f64, digits: usize) -> String {
     if value == 0.0 {
         return "0".to_owned();
     }
@@ -16,12 +22,12 @@ pub fn figure(value: f64) -> String {
         return "no figure".to_owned();
     }
     // The standard library rounds the exact decimal expansion, on every device alike.
-    let scientific = format!("{value:.*e}", DIGITS - 1);
+    let scientific = format!("{value:.*e}", digits.max(1) - 1);
     let (mantissa, exponent) = scientific.split_once('e').unwrap_or((&scientific, "0"));
     let exponent: i32 = exponent.parse().unwrap_or(0);
     let near = |text: &str| text.parse::<f64>().is_ok_and(|v| (v / value - 1.0).abs() < 1e-12);
     if (-3..7).contains(&exponent) {
-        let decimals = usize::try_from(DIGITS as i32 - 1 - exponent).unwrap_or(0);
+        let decimals = usize::try_from(digits as i32 - 1 - exponent).unwrap_or(0);
         let full = format!("{value:.decimals$}");
         if near(&full) { trimmed(&full).to_owned() } else { full }
     } else {

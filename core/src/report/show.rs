@@ -1,9 +1,38 @@
 //! Sizes as sentences and tables show them, in the units of the book and rounded for reading.
 
-use super::figure::decimals;
+use super::convert::in_unit;
+use super::figure::{decimals, figure_of, unit as unit_name};
 use crate::check::{Action, SignUnit};
-use crate::quantity::{Force, Length, LineLoad, Moment, Quantity, Stress};
+use crate::quantity::{Dimension, Force, Length, LineLoad, Moment, Quantity, Stress};
 use crate::units::System;
+
+/// Significant digits of what is read off: more than a tape or a caliper gives.
+const READ: usize = 4;
+
+/// A quantity, given in its base unit, in the unit of its field.
+#[must_use]
+pub fn quantity(base: f64, dimension: Dimension, unit: &str) -> String {
+    let figure = figure_of(in_unit(base, dimension, unit), READ);
+    match unit {
+        "" => figure,
+        "°" => figure + "°",
+        unit => format!("{figure} {}", unit_name(unit)),
+    }
+}
+
+/// What several readings, given in their base unit, come to.
+#[must_use]
+pub fn readings(bases: &[f64], mean: f64, dimension: Dimension, unit: &str) -> String {
+    let ends = bases.iter().fold((mean, mean), |(low, high), b| (b.min(low), b.max(high)));
+    let plain = |base: f64| figure_of(in_unit(base, dimension, unit), READ);
+    format!(
+        "{} readings · mean {} · spread {} to {}",
+        bases.len(),
+        quantity(mean, dimension, unit),
+        plain(ends.0),
+        quantity(ends.1, dimension, unit)
+    )
+}
 
 /// A place along the span, to a hundredth of a metre or a tenth of a foot.
 #[must_use]
@@ -95,6 +124,19 @@ mod tests {
         assert_eq!(weight(Force::from_kip(50.0), System::FootKip), "25 tons");
         assert_eq!(limit(su7, SignUnit::Tonnes), "35 t");
         assert_eq!(limit(su7, SignUnit::ShortTons), "38 tons");
+    }
+
+    /// Seven cores, mean by hand: 497 / 7 = 71.
+    #[test]
+    fn readings_have_a_mean_and_a_spread() {
+        let cores = [65.0, 72.0, 70.0, 68.0, 78.0, 74.0, 70.0].map(|mm| 10.0 * mm);
+        let mean = cores.iter().sum::<f64>() / 7.0;
+        assert_eq!(
+            readings(&cores, mean, Dimension::Length, "mm"),
+            "7 readings · mean 71 mm · spread 65 to 78 mm"
+        );
+        assert_eq!(quantity(254.0 * 7.25, Dimension::Length, "mm"), "184.2 mm");
+        assert_eq!(quantity(0.85, Dimension::Number, ""), "0.85");
     }
 
     #[test]

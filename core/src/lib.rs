@@ -9,7 +9,9 @@
 pub mod bridge;
 pub mod check;
 pub mod clauses;
+pub mod document;
 pub mod influence;
+pub mod limits;
 pub mod load;
 pub mod material;
 pub mod moving;

@@ -1,5 +1,7 @@
 //! Materials: strengths and moduli, and where they are known from.
 
+pub mod weight;
+
 use crate::quantity::{Stress, UnitWeight};
 use crate::units::Entered;
 

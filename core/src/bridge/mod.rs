@@ -8,6 +8,7 @@ mod at;
 pub mod deck;
 pub mod finding;
 pub mod member;
+pub mod posting;
 pub mod site;
 
 use crate::quantity::{Angle, Length};
@@ -16,6 +17,7 @@ use crate::units::Entered;
 pub use deck::{Deck, Layer, Stage, Strip, StripSide};
 pub use finding::{Finding, Straightness};
 pub use member::{Bracing, Composite, Embedded, Member, MemberKind, SteelGirder, WebEnds};
+pub use posting::{OwnVehicle, Posting, SignUnit};
 pub use site::{ConditionRating, Overrides, Riding, Site, Traffic};
 
 /// A bridge as it stands today.
@@ -37,6 +39,10 @@ pub struct Bridge {
     pub findings: Vec<Finding>,
     /// Traffic that uses it.
     pub traffic: Traffic,
+    /// Vehicles of one's own state or agency.
+    pub vehicles: Vec<OwnVehicle>,
+    /// How it is posted.
+    pub posting: Posting,
 }
 
 /// One span.

@@ -77,6 +77,8 @@ pub struct Effective<'a> {
     pub shape: &'a IShape,
     /// Out-to-out depth of what is left.
     pub depth: Val<Length>,
+    /// Height of the sound top face, on which the haunch sits, above the bottom face that is left.
+    pub seat: Val<Length>,
     /// The plates that are left.
     pub plates: Plates,
     /// Height of the elastic centroid above the bottom face of what is left.
@@ -167,7 +169,7 @@ clause! {
     /// From heights above the sound bottom face to heights above the face that is left, in.
     pub fn height_left(y: Length [Inch], delta_bot: Length [Inch]) -> y_left: Length [Inch]
     { y - delta_bot }
-    cite "geometry" what "height of the centroid above the bottom face that is left"
+    cite "geometry" what "height above the bottom face that is left"
 }
 
 clause! {
@@ -320,6 +322,7 @@ impl<'a> Effective<'a> {
             return Ok(Self {
                 shape,
                 depth: sound.d,
+                seat: sound.d,
                 plates: sound.plates,
                 y: sound.totals.y,
                 plastic_y: sound.plastic.y,
@@ -388,6 +391,7 @@ impl<'a> Effective<'a> {
         Ok(Self {
             shape,
             depth,
+            seat: height_left(rec, sound.d, gone_bottom),
             plates,
             y,
             plastic_y: plastic.y,

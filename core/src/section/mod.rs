@@ -4,8 +4,10 @@
 //! - [`rolled`]: published dimensions and properties of rolled shapes;
 //! - [`parts`]: area, centroid and second moment of area as a take-off;
 //! - [`plastic`]: plastic neutral axis and plastic modulus of the plates;
-//! - [`effective`]: the steel section at a station, sound and as it is left.
+//! - [`effective`]: the steel section at a station, sound and as it is left;
+//! - [`composite`]: steel and slab together, short-term and long-term, and stresses by stages.
 
+pub mod composite;
 pub mod effective;
 pub mod parts;
 pub mod plastic;

@@ -12,6 +12,7 @@
 //! - [`service`]: limits of Service II; [`shear`]: shear; [`bearing`]: the web over a bearing.
 
 pub mod bearing;
+pub mod composite;
 pub mod flange;
 pub mod lateral;
 pub mod local;

@@ -1,0 +1,34 @@
+//! What the agency adds: vehicles of its own, and how it posts.
+
+use crate::quantity::{Force, Length};
+
+/// A vehicle of one's own state or agency, as an axle list.
+#[derive(Clone, Debug, PartialEq)]
+pub struct OwnVehicle {
+    /// Id in the document.
+    pub id: String,
+    /// What it is called.
+    pub name: String,
+    /// Weight of each axle, from the front; one at least.
+    pub axles: Vec<Force>,
+    /// Distance from each axle to the next; one fewer than axles.
+    pub spacings: Vec<Length>,
+}
+
+/// Unit in which a sign is written.
+#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+pub enum SignUnit {
+    /// Short tons of 2,000 lb.
+    ShortTons,
+    /// Tonnes of 1,000 kg.
+    Tonnes,
+}
+
+/// How the bridge is posted.
+#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+pub struct Posting {
+    /// Unit of the sign.
+    pub sign: SignUnit,
+    /// Whether yielding in service decides as well; none leaves it to the rule set.
+    pub service_governs: Option<bool>,
+}

@@ -10,7 +10,7 @@ use girderbook_core::rating::{
     Check, DeadEffects, Factors, Figures, Key, LineSummary, LiveLoad, Rating, VehicleResult,
 };
 use girderbook_core::report::diagram::curve;
-use girderbook_core::report::tables::{by_vehicle, check_figures, girders, posting, text};
+use girderbook_core::report::tables::{by_vehicle, check_figures, dead_loads, girders, posting, text};
 use girderbook_core::report::verdict::CAUTIONS;
 use girderbook_core::report::{Tone, unrated, verdict};
 use girderbook_core::units::System::{FootKip, MetreKilonewton};
@@ -232,12 +232,21 @@ SU7              35.2 t        0.91        0.81  G2, bending stress, 9.14 m     
 #[test]
 fn the_tables_of_girders_and_posting() {
     assert_eq!(
-        text(&girders(&rating(), MetreKilonewton)),
+        text(&dead_loads(&rating(), MetreKilonewton)),
         "\
-Girders: dead load in kN/m, share of a lane, least factor at the legal level
-Girder  DC1    DC2   DW    Share, moment  Share, shear  Least
-G1      12.78  1.82  3.48          0.648  no number      1.17
-G2      12.78  1.82  3.48          0.648  no number      0.81
+Dead load of each girder, kN/m
+Girder  DC1    DC2   DW    All
+G1      12.78  1.82  3.48  18.09
+G2      12.78  1.82  3.48  18.09
+"
+    );
+    assert_eq!(
+        text(&girders(&rating(), FootKip)),
+        "\
+Share of a lane and least legal factor of each girder
+Girder  Moment  Shear      Least  Of
+G1       0.648  no number   1.17  Type 3S2, bending stress, 30.0 ft
+G2       0.648  no number   0.81  SU7, bending stress, 30.0 ft
 "
     );
     assert_eq!(

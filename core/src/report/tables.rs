@@ -122,7 +122,26 @@ pub fn check_figures(check: &Check, system: System) -> Table {
     Table { caption: "What went into it".to_owned(), head: heads(&["", "Value"]), rows }
 }
 
-/// Dead loads and shares of each girder line.
+/// Dead loads of each girder line.
+#[must_use]
+pub fn dead_loads(rating: &Rating, system: System) -> Table {
+    let rows = rating
+        .lines
+        .iter()
+        .map(|line| {
+            let loads = [line.dc1, line.dc2, line.dw, line.dc1 + line.dc2 + line.dw];
+            let figures = loads.into_iter().map(|load| number(line_load(load, system)));
+            core::iter::once(words(line.name.clone())).chain(figures).collect()
+        })
+        .collect();
+    Table {
+        caption: format!("Dead load of each girder, {}", line_load_unit(system)),
+        head: heads(&["Girder", "DC1", "DC2", "DW", "All"]),
+        rows,
+    }
+}
+
+/// Share of a lane and least factor of each girder line.
 #[must_use]
 pub fn girders(rating: &Rating, system: System) -> Table {
     let rows = rating
@@ -134,29 +153,29 @@ pub fn girders(rating: &Rating, system: System) -> Table {
                 Err(_) => Cell { tone: Tone::Caution, ..words("no number") },
             };
             let worst = line.governing.and_then(|i| Some((i, rating.checks.get(i)?)));
-            vec![
-                words(line.name.clone()),
-                number(line_load(line.dc1, system)),
-                number(line_load(line.dc2, system)),
-                number(line_load(line.dw, system)),
-                share(&line.share_moment),
-                share(&line.share_shear),
-                match worst {
-                    Some((i, check)) => Cell {
+            let (least, place) = match worst {
+                Some((i, check)) => (
+                    Cell {
                         text: outcome(&check.outcome),
                         number: true,
                         tone: outcome_tone(&check.outcome),
                         check: Some(i),
                     },
-                    None => words("none"),
-                },
-            ]
+                    words(format!(
+                        "{}, {}, {}",
+                        load_name(rating, check.key.load),
+                        names::action(check.key.action),
+                        station(check.key.x, system)
+                    )),
+                ),
+                None => (words("none"), words("")),
+            };
+            vec![words(line.name.clone()), share(&line.share_moment), share(&line.share_shear), least, place]
         })
         .collect();
-    let unit = line_load_unit(system);
     Table {
-        caption: format!("Girders: dead load in {unit}, share of a lane, least factor at the legal level"),
-        head: heads(&["Girder", "DC1", "DC2", "DW", "Share, moment", "Share, shear", "Least"]),
+        caption: "Share of a lane and least legal factor of each girder".to_owned(),
+        head: heads(&["Girder", "Moment", "Shear", "Least", "Of"]),
         rows,
     }
 }

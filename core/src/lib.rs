@@ -6,6 +6,7 @@
 //! source, so that the same book gives the same answer on every device.
 #![forbid(unsafe_code)]
 
+pub mod basis;
 pub mod bridge;
 pub mod check;
 pub mod clauses;
@@ -22,5 +23,6 @@ pub mod rating;
 pub mod report;
 pub mod resistance;
 pub mod section;
+pub mod share;
 pub mod units;
 pub mod worksheet;

@@ -20,3 +20,11 @@ pub struct Concrete {
     /// Unit weight of the reinforced concrete, for dead load.
     pub unit_weight: Entered<UnitWeight>,
 }
+
+/// Strengths that hold where none was entered, by the rules in force.
+pub trait Defaults {
+    /// Yield strength of structural steel by year built, and where it is known from.
+    fn yield_strength(&self, year: Option<i32>) -> Option<(Stress, &'static str)>;
+    /// Compressive strength of concrete by year built, and where it is known from.
+    fn concrete_strength(&self, year: Option<i32>) -> Option<(Stress, &'static str)>;
+}

@@ -17,7 +17,7 @@ use crate::units::Entered;
 pub use deck::{Deck, Layer, Stage, Strip, StripSide};
 pub use finding::{Finding, Straightness};
 pub use member::{Bracing, Composite, Embedded, Member, MemberKind, SteelGirder, WebEnds};
-pub use posting::{OwnVehicle, Posting, SignUnit};
+pub use posting::{OwnVehicle, Posting};
 pub use site::{ConditionRating, Overrides, Riding, Site, Traffic};
 
 /// A bridge as it stands today.

@@ -1,6 +1,7 @@
 //! What the agency adds: vehicles of its own, and how it posts.
 
 use crate::quantity::{Force, Length};
+use crate::units::WeightUnit;
 
 /// A vehicle of one's own state or agency, as an axle list.
 #[derive(Clone, Debug, PartialEq)]
@@ -15,20 +16,11 @@ pub struct OwnVehicle {
     pub spacings: Vec<Length>,
 }
 
-/// Unit in which a sign is written.
-#[derive(Clone, Copy, Debug, PartialEq, Eq)]
-pub enum SignUnit {
-    /// Short tons of 2,000 lb.
-    ShortTons,
-    /// Tonnes of 1,000 kg.
-    Tonnes,
-}
-
 /// How the bridge is posted.
 #[derive(Clone, Copy, Debug, PartialEq, Eq)]
 pub struct Posting {
     /// Unit of the sign.
-    pub sign: SignUnit,
+    pub sign: WeightUnit,
     /// Whether yielding in service decides as well; none leaves it to the rule set.
     pub service_governs: Option<bool>,
 }

@@ -1,6 +1,7 @@
 //! What follows from the outcomes for a sign at the bridge.
 
 use crate::quantity::Force;
+use crate::units::WeightUnit;
 
 /// What kind of vehicle, as signs tell them apart.
 #[derive(Clone, Copy, Debug, PartialEq, Eq)]
@@ -37,21 +38,12 @@ pub enum Sign {
         /// For combinations.
         combination: Option<u32>,
         /// The unit of both figures.
-        unit: SignUnit,
+        unit: WeightUnit,
     },
     /// Below the least limit that a bridge may stay open with, or no vehicle type allowed: close.
     Close,
     /// No answer: something that has to be rated got no number.
     NotKnown,
-}
-
-/// Unit on a sign.
-#[derive(Clone, Copy, Debug, PartialEq, Eq)]
-pub enum SignUnit {
-    /// Short tons of 2,000 lb.
-    ShortTons,
-    /// Tonnes.
-    Tonnes,
 }
 
 /// The safe load of one vehicle type.

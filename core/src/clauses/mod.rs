@@ -3,3 +3,4 @@
 //! One folder for each standard; standards never use each other.
 
 pub mod lrfd;
+pub mod mbe;

@@ -26,7 +26,7 @@ pub use book::Book;
 pub use edit::{Edit, FieldView};
 pub use entry::{Entry, Origin};
 pub use fields::{FieldInfo, fields};
-pub use open::{Defaults, Filled, Opened, bridge};
+pub use open::{Filled, Opened, bridge};
 pub use read::{MOST_BYTES, MOST_CHARACTERS, MOST_ITEMS, MOST_LEVELS, read, write};
 pub use readings::value;
 pub use schema::schema;

@@ -5,9 +5,16 @@
 //! station, and their combination. The check that somebody opens is worked again on a sheet by the
 //! same functions.
 
+pub mod combine;
+pub mod effects;
+mod govern;
+mod line;
+mod rater;
 pub mod result;
+mod stations;
 
-pub use crate::check::{Class, Limit, Posting, SafeLoad, Sign, SignUnit};
+pub use crate::check::{Class, Limit, Posting, SafeLoad, Sign};
+pub use rater::Rater;
 pub use result::{
     Capacity, Check, DeadEffects, Factors, Figures, Key, LineSummary, LiveLoad, Rating, VehicleResult,
 };

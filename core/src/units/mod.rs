@@ -10,4 +10,4 @@ pub mod system;
 
 pub use mark::Mark;
 pub use reading::{Entered, Provenance};
-pub use system::System;
+pub use system::{System, WeightUnit};

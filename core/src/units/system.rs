@@ -52,3 +52,12 @@ pub const fn default_unit(system: System, dimension: Dimension, scale: Scale) ->
         (D::Moment, FootKip, _) => "kip ft",
     }
 }
+
+/// Unit of weight on a sign. Short tons and tonnes differ by a tenth, so it stands beside every weight.
+#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+pub enum WeightUnit {
+    /// Short tons of 2,000 lb.
+    ShortTons,
+    /// Tonnes of 1,000 kg.
+    Tonnes,
+}

@@ -1,10 +1,10 @@
 //! The deck, what lies on it and what stands along it.
 
-use super::Defaults;
 use super::member::Members;
 use super::reader::{Reader, Wrong};
 use crate::bridge::{Deck, Layer, Stage, Strip, StripSide};
 use crate::document::book::{Placed, Side, Substance};
+use crate::material::Defaults;
 use crate::material::{Concrete, weight};
 use crate::quantity::Length;
 use crate::units::{Entered, Provenance};

@@ -1,10 +1,10 @@
 //! Kinds of girder: the section as measured or as a table has it, the steel, the bracing.
 
-use super::Defaults;
 use super::reader::{Reader, Wrong};
 use crate::bridge::{Bracing, Composite, Embedded, Member, MemberKind, SteelGirder};
 use crate::document::book::{self, Connectors, Presence};
 use crate::document::entry::Entry;
+use crate::material::Defaults;
 use crate::material::Steel;
 use crate::quantity::Length;
 use crate::section::plate::{Flange, IShape, Published};

@@ -1,9 +1,7 @@
 //! The words of a verdict and its tables, pinned. The ratings here are made by hand: they hold
 //! figures for the words, not results.
 
-use girderbook_core::check::{
-    Action, Class, Level, Limit, LimitState, Outcome, Posting, SafeLoad, Sign, SignUnit,
-};
+use girderbook_core::check::{Action, Class, Level, Limit, LimitState, Outcome, Posting, SafeLoad, Sign};
 use girderbook_core::problem::Problem;
 use girderbook_core::quantity::{Force, Length, LineLoad};
 use girderbook_core::rating::{
@@ -14,6 +12,7 @@ use girderbook_core::report::tables::{by_vehicle, check_figures, dead_loads, gir
 use girderbook_core::report::verdict::CAUTIONS;
 use girderbook_core::report::{Tone, unrated, verdict};
 use girderbook_core::units::System::{FootKip, MetreKilonewton};
+use girderbook_core::units::WeightUnit;
 
 fn load(id: &str, level: Level, kip: f64, class: Class) -> LiveLoad {
     let weight = (class != Class::Design).then(|| Force::from_kip(kip));
@@ -101,7 +100,7 @@ fn rating() -> Rating {
             vehicle(3, Some(1), Some(0), Some(0), Some(28.8)),
         ],
         posting: Posting {
-            sign: Sign::Limit { single_unit: Some(25), combination: None, unit: SignUnit::Tonnes },
+            sign: Sign::Limit { single_unit: Some(25), combination: None, unit: WeightUnit::Tonnes },
             safe: vec![
                 safe(1, 1.2149, Limit::Full),
                 safe(2, 1.1733, Limit::Full),
@@ -156,14 +155,13 @@ fn every_posting_has_its_sentence() {
         verdict(&rating, FootKip).headline
     };
     let limit =
-        |single_unit, combination| Sign::Limit { single_unit, combination, unit: SignUnit::ShortTons };
+        |single_unit, combination| Sign::Limit { single_unit, combination, unit: WeightUnit::ShortTons };
     let barred = vec![SafeLoad { load: 1, factor: Some(0.2), limit: Limit::NotAllowed }];
     for (sign, safe, words) in [
         (Sign::None, vec![], "Carries all legal loads: no posting."),
         (limit(Some(21), Some(34)), vec![], "Post: single-unit trucks 21 tons, combinations 34 tons."),
         (limit(Some(12), Some(12)), vec![], "Post for all trucks: 12 tons."),
         (limit(None, Some(34)), vec![], "Post for combinations: 34 tons."),
-        (limit(None, None), vec![], "Legal trucks pass; vehicles of your own need a limit."),
         (Sign::Close, barred, "Close: no legal truck may cross."),
         (Sign::Close, vec![], "Close: what it safely carries is below the least limit of an open bridge."),
         (Sign::NotKnown, vec![], "No answer on posting: something that has to be rated got no number."),
@@ -250,7 +248,7 @@ G2       0.648  no number   0.81  SU7, bending stress, 30.0 ft
 "
     );
     assert_eq!(
-        text(&posting(&rating(), FootKip, SignUnit::Tonnes)),
+        text(&posting(&rating(), FootKip, WeightUnit::Tonnes)),
         "\
 Safe load by vehicle, rounded down in the unit of the sign
 Vehicle   Kind                Weight      Factor  Limit

@@ -3,6 +3,7 @@
 //! place that is gone leads to the nearest one.
 
 use girderbook_core::check::{Action, Level, LimitState};
+use girderbook_core::document::Book;
 use girderbook_core::quantity::Quantity;
 use girderbook_core::rating::{Check, Rating};
 
@@ -65,12 +66,12 @@ impl Key {
         })
     }
 
-    /// The name of a check of the scene's rating.
+    /// The name of a check.
     #[must_use]
-    pub fn of(s: &Scene, rating: &Rating, check: &Check) -> Self {
+    pub fn of(book: &Book, rating: &Rating, check: &Check) -> Self {
         Self {
             load: load(rating, check.key.load),
-            girder: s.book.girders.get(check.key.line).map_or(String::new(), |g| g.id.0.clone()),
+            girder: book.girders.get(check.key.line).map_or(String::new(), |g| g.id.0.clone()),
             kind: kind(check.key.action, check.key.state).to_owned(),
             x: Some(check.key.x.base()),
         }
@@ -86,11 +87,9 @@ impl Key {
     /// Index of the check that it means. Without that kind of check on the girder, its worst of
     /// another kind for the same load.
     #[must_use]
-    pub fn find(&self, girders: &[String], rating: &Rating) -> Option<usize> {
-        let line = girders.iter().position(|id| *id == self.girder)?;
-        let of_load = |check: &Check| {
-            check.key.line == line && load(rating, check.key.load) == self.load
-        };
+    pub fn find(&self, book: &Book, rating: &Rating) -> Option<usize> {
+        let line = book.girders.iter().position(|girder| girder.id.0 == self.girder)?;
+        let of_load = |check: &Check| check.key.line == line && load(rating, check.key.load) == self.load;
         let of_kind = |check: &Check| kind(check.key.action, check.key.state) == self.kind;
         let far = |check: &Check| match self.x {
             Some(x) => (check.key.x.base() - x).abs(),
@@ -101,11 +100,7 @@ impl Key {
     }
 }
 
-fn least(
-    rating: &Rating,
-    wanted: impl Fn(&Check) -> bool,
-    measure: impl Fn(&Check) -> f64,
-) -> Option<usize> {
+fn least(rating: &Rating, wanted: impl Fn(&Check) -> bool, measure: impl Fn(&Check) -> f64) -> Option<usize> {
     let checks = rating.checks.iter().enumerate().filter(|(_, check)| wanted(check));
     checks.min_by(|(_, a), (_, b)| measure(a).total_cmp(&measure(b))).map(|(i, _)| i)
 }
@@ -115,5 +110,5 @@ fn least(
 pub fn go(s: &Scene, check: usize) -> String {
     let Some(rating) = s.rating else { return String::new() };
     let Some(check) = rating.checks.get(check) else { return String::new() };
-    format!("sheet:{}", Key::of(s, rating, check).text())
+    format!("sheet:{}", Key::of(s.book, rating, check).text())
 }

@@ -9,7 +9,6 @@ use crate::scene::Scene;
 pub fn lists(s: &Scene) -> Vec<Node> {
     let list = |severity, title: &str| {
         let items: Vec<Node> = s
-            .opened
             .problems
             .iter()
             .filter(|problem| problem.severity == severity)

@@ -238,9 +238,8 @@ mod tests {
 
     fn page(length: &str, problem: &str) -> Vec<Node> {
         vec![
-            Node::region("a", "Span").and(
-                Node::new("field").named("f:span.length").with("text", length).with("problem", problem),
-            ),
+            Node::region("a", "Span")
+                .and(Node::new("field").named("f:span.length").with("text", length).with("problem", problem)),
             Node::region("b", "Roadway").and(Node::new("text").with("text", "between curbs")),
         ]
     }

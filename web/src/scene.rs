@@ -1,17 +1,15 @@
 //! What the pages and drawings are made from, and how a field of the book becomes a node.
 
+use girderbook_core::basis::Case;
 use girderbook_core::bridge::Bridge;
-use girderbook_core::check::SignUnit;
 use girderbook_core::document::fields::{self, Form, Group, Measure, Several};
-use girderbook_core::document::{Book, FieldView, Opened, book, value};
+use girderbook_core::document::{Book, FieldView, Opened, Origin, book, value};
 use girderbook_core::problem::{Problem, Severity};
-use girderbook_core::quantity::{
-    Angle, Dimension, Force, Length, LineLoad, Quantity, Stress, UnitWeight,
-};
+use girderbook_core::quantity::{Angle, Dimension, Force, Length, LineLoad, Quantity, Stress, UnitWeight};
 use girderbook_core::rating::Rating;
 use girderbook_core::report::SheetRow;
 use girderbook_core::report::show::{quantity, readings};
-use girderbook_core::units::{Provenance, System};
+use girderbook_core::units::{Provenance, System, WeightUnit};
 
 use crate::node::Node;
 
@@ -33,8 +31,16 @@ pub struct Scene<'a> {
     pub book: &'a Book,
     /// What it says.
     pub opened: &'a Opened,
+    /// What keeps the bridge from being rated, or is worth knowing, from the book and the rating.
+    pub problems: &'a [Problem],
     /// What comes out, where nothing is missing.
     pub rating: Option<&'a Rating>,
+    /// Name of the rule set.
+    pub rules: &'a str,
+    /// Its standards and editions.
+    pub editions: &'a str,
+    /// The loads of the rule set with their axles.
+    pub cases: &'a [Case],
     /// Index of the check whose sheet is open.
     pub shown: Option<usize>,
     /// The lines of that sheet; empty unless its page is open.
@@ -62,10 +68,10 @@ impl<'a> Scene<'a> {
 
     /// Unit of the sign.
     #[must_use]
-    pub fn sign_unit(&self) -> SignUnit {
+    pub fn sign_unit(&self) -> WeightUnit {
         match self.book.posting.unit {
-            book::SignUnit::ShortTons => SignUnit::ShortTons,
-            book::SignUnit::Tonnes => SignUnit::Tonnes,
+            book::SignUnit::ShortTons => WeightUnit::ShortTons,
+            book::SignUnit::Tonnes => WeightUnit::Tonnes,
         }
     }
 
@@ -124,8 +130,7 @@ impl<'a> Scene<'a> {
         if let Some(refused) = self.refused_at(path) {
             told = Told::of([&refused.problem].into_iter());
         }
-        let options =
-            view.options.iter().map(|value| option(value, &named(value)));
+        let options = view.options.iter().map(|value| option(value, &named(value)));
         let node = Node::new("choice")
             .named(field_id(path))
             .with("path", path)
@@ -134,6 +139,24 @@ impl<'a> Scene<'a> {
             .with("value", view.text.clone())
             .all(options);
         told.onto(node)
+    }
+
+    /// A field of words in which one of several names is picked; `options` are names and words.
+    #[must_use]
+    pub fn pick(&self, path: &str, label: &str, hint: &str, options: &[(&str, &str)]) -> Node {
+        let text = self.view(path).text;
+        let known = options.iter().any(|(name, _)| *name == text);
+        // A name that is none of them, from a file or not yet picked, stays to be seen.
+        let own = (!known).then(|| option(&text, if text.is_empty() { "choose" } else { &text }));
+        let node = Node::new("choice")
+            .named(field_id(path))
+            .with("path", path)
+            .with("label", label)
+            .with("hint", hint)
+            .with("value", text.clone())
+            .all(own)
+            .all(options.iter().map(|(name, words)| option(name, words)));
+        Told::of(self.problems_at(path)).onto(node)
     }
 
     /// Where a problem leads: its field, or the page of its list.
@@ -153,12 +176,29 @@ impl<'a> Scene<'a> {
         value::<Q>(self.book, path)?.ok()
     }
 
+    /// Values that nobody measured or took from a drawing, each with what it is.
+    #[must_use]
+    pub fn assumed(&self) -> Vec<String> {
+        let filled = self.opened.filled.iter().filter(|filled| filled.from == Provenance::Assumed);
+        let mut all: Vec<(String, String)> =
+            filled.map(|filled| (filled.path.clone(), filled.text.clone())).collect();
+        for field in fields::fields(self.book) {
+            let view = self.view(&field.path);
+            if view.from == Some(Origin::Assumed) && !view.text.is_empty() {
+                all.push((field.path, view.text));
+            }
+        }
+        all.into_iter()
+            .map(|(path, text)| format!("{} {text}", fields::label(&path).to_lowercase()))
+            .collect()
+    }
+
     fn view(&self, path: &str) -> FieldView {
         self.book.text(path).unwrap_or(FieldView { text: String::new(), from: None, options: Vec::new() })
     }
 
     fn problems_at(&self, path: &str) -> impl Iterator<Item = &'a Problem> {
-        self.opened.problems.iter().filter(move |problem| problem.path == path)
+        self.problems.iter().filter(move |problem| problem.path == path)
     }
 
     fn refused_at(&self, path: &str) -> Option<&'a Refused> {

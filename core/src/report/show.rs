@@ -2,9 +2,9 @@
 
 use super::convert::in_unit;
 use super::figure::{decimals, figure_of, unit as unit_name};
-use crate::check::{Action, SignUnit};
+use crate::check::Action;
 use crate::quantity::{Dimension, Force, Length, LineLoad, Moment, Quantity, Stress};
-use crate::units::System;
+use crate::units::{System, WeightUnit};
 
 /// Significant digits of what is read off: more than a tape or a caliper gives.
 const READ: usize = 4;
@@ -95,19 +95,19 @@ pub fn effect(base: f64, action: Action, system: System) -> String {
 
 /// A weight in the unit of a sign, rounded down, as a sentence says it.
 #[must_use]
-pub fn limit(force: Force, unit: SignUnit) -> String {
+pub fn limit(force: Force, unit: WeightUnit) -> String {
     match unit {
-        SignUnit::ShortTons => format!("{:.0} tons", libm::floor(force.in_short_ton())),
-        SignUnit::Tonnes => format!("{:.0} t", libm::floor(force.in_tonne())),
+        WeightUnit::ShortTons => format!("{:.0} tons", libm::floor(force.in_short_ton())),
+        WeightUnit::Tonnes => format!("{:.0} t", libm::floor(force.in_tonne())),
     }
 }
 
 /// A limit that a sign has, as a sentence says it.
 #[must_use]
-pub fn signed(limit: u32, unit: SignUnit) -> String {
+pub fn signed(limit: u32, unit: WeightUnit) -> String {
     match unit {
-        SignUnit::ShortTons => format!("{limit} tons"),
-        SignUnit::Tonnes => format!("{limit} t"),
+        WeightUnit::ShortTons => format!("{limit} tons"),
+        WeightUnit::Tonnes => format!("{limit} t"),
     }
 }
 
@@ -122,8 +122,8 @@ mod tests {
         assert_eq!(weight(su7, System::MetreKilonewton), "35.2 t");
         assert_eq!(weight(su7, System::FootKip), "38.75 tons");
         assert_eq!(weight(Force::from_kip(50.0), System::FootKip), "25 tons");
-        assert_eq!(limit(su7, SignUnit::Tonnes), "35 t");
-        assert_eq!(limit(su7, SignUnit::ShortTons), "38 tons");
+        assert_eq!(limit(su7, WeightUnit::Tonnes), "35 t");
+        assert_eq!(limit(su7, WeightUnit::ShortTons), "38 tons");
     }
 
     /// Seven cores, mean by hand: 497 / 7 = 71.

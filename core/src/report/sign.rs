@@ -4,7 +4,8 @@
 //! with a limit for each kind of vehicle; R11-2 for a closed bridge.
 
 use super::show::signed;
-use crate::check::{Sign, SignUnit};
+use crate::check::Sign;
+use crate::units::WeightUnit;
 
 /// What stands on a sign.
 #[derive(Clone, Debug, PartialEq, Eq)]
@@ -29,8 +30,8 @@ pub fn face(sign: Sign) -> Option<Face> {
             if single == combination =>
         {
             let rows = match unit {
-                SignUnit::ShortTons => vec![title, ("", single.to_string()), ("TONS", String::new())],
-                SignUnit::Tonnes => vec![title, ("", format!("{single} t"))],
+                WeightUnit::ShortTons => vec![title, ("", single.to_string()), ("TONS", String::new())],
+                WeightUnit::Tonnes => vec![title, ("", format!("{single} t"))],
             };
             Some(Face { rows, spoken: format!("sign: weight limit {}", signed(single, unit)) })
         }
@@ -40,8 +41,8 @@ pub fn face(sign: Sign) -> Option<Face> {
             for (name, limit) in [("SINGLE UNIT", single_unit), ("COMBINATION", combination)] {
                 if let Some(limit) = limit {
                     let text = match unit {
-                        SignUnit::ShortTons => format!("{limit} T"),
-                        SignUnit::Tonnes => format!("{limit} t"),
+                        WeightUnit::ShortTons => format!("{limit} T"),
+                        WeightUnit::Tonnes => format!("{limit} t"),
                     };
                     rows.push((name, text));
                     parts.push(format!("{} {}", name.to_lowercase(), signed(limit, unit)));
@@ -64,21 +65,21 @@ mod tests {
     #[test]
     fn the_face_says_what_the_posting_says() {
         let limit = |single_unit, combination, unit| Sign::Limit { single_unit, combination, unit };
-        assert_eq!(rows(limit(Some(25), None, SignUnit::Tonnes)), ["WEIGHT LIMIT", "SINGLE UNIT 25 t"]);
+        assert_eq!(rows(limit(Some(25), None, WeightUnit::Tonnes)), ["WEIGHT LIMIT", "SINGLE UNIT 25 t"]);
         assert_eq!(
-            rows(limit(Some(21), Some(34), SignUnit::ShortTons)),
+            rows(limit(Some(21), Some(34), WeightUnit::ShortTons)),
             ["WEIGHT LIMIT", "SINGLE UNIT 21 T", "COMBINATION 34 T"]
         );
-        assert_eq!(rows(limit(Some(12), Some(12), SignUnit::ShortTons)), ["WEIGHT LIMIT", "12", "TONS"]);
+        assert_eq!(rows(limit(Some(12), Some(12), WeightUnit::ShortTons)), ["WEIGHT LIMIT", "12", "TONS"]);
         assert_eq!(rows(Sign::Close), ["BRIDGE", "CLOSED"]);
         assert_eq!(face(Sign::None), None);
         assert_eq!(face(Sign::NotKnown), None);
-        assert_eq!(face(limit(None, None, SignUnit::Tonnes)), None);
+        assert_eq!(face(limit(None, None, WeightUnit::Tonnes)), None);
     }
 
     #[test]
     fn it_can_be_spoken() {
-        let sign = Sign::Limit { single_unit: Some(21), combination: Some(34), unit: SignUnit::ShortTons };
+        let sign = Sign::Limit { single_unit: Some(21), combination: Some(34), unit: WeightUnit::ShortTons };
         assert_eq!(
             face(sign).expect("a sign").spoken,
             "sign: weight limit, single unit 21 tons, combination 34 tons"

@@ -4,9 +4,9 @@ use super::figure::{decimals, factor};
 use super::names;
 use super::show::{effect, line_load, line_load_unit, station, weight};
 use super::verdict::{Tone, limit, outcome, outcome_tone};
-use crate::check::{Class, SignUnit};
+use crate::check::{Class, Limit};
 use crate::rating::{Check, Rating};
-use crate::units::System;
+use crate::units::{System, WeightUnit};
 
 /// A table.
 #[derive(Clone, Debug, PartialEq)]
@@ -182,7 +182,7 @@ pub fn girders(rating: &Rating, system: System) -> Table {
 
 /// The safe load of each legal vehicle.
 #[must_use]
-pub fn posting(rating: &Rating, system: System, unit: SignUnit) -> Table {
+pub fn posting(rating: &Rating, system: System, unit: WeightUnit) -> Table {
     let rows = rating
         .posting
         .safe
@@ -190,8 +190,8 @@ pub fn posting(rating: &Rating, system: System, unit: SignUnit) -> Table {
         .map(|safe| {
             let load = rating.loads.get(safe.load);
             let tone = match safe.limit {
-                crate::check::Limit::Full => Tone::Good,
-                crate::check::Limit::NotKnown => Tone::Caution,
+                Limit::Full => Tone::Good,
+                Limit::NotKnown => Tone::Caution,
                 _ => Tone::Bad,
             };
             vec![

@@ -4,10 +4,10 @@ use super::figure::factor;
 use super::names;
 use super::show::{limit as limit_of, signed, station};
 use super::sign::{Face, face};
-use crate::check::{Limit, Outcome, Sign, SignUnit};
+use crate::check::{Limit, Outcome, Sign};
 use crate::problem::{Problem, Severity};
 use crate::rating::{Check, Rating};
-use crate::units::System;
+use crate::units::{System, WeightUnit};
 
 /// How a thing stands; always said in words beside it.
 #[derive(Clone, Copy, Debug, Default, PartialEq, Eq)]
@@ -66,6 +66,8 @@ pub const CAUTIONS: [&str; 4] = [
     "Not rated: deck slab, fatigue, scour, substructure, bearings, connections, gusset plates.",
 ];
 
+const NO_POSTING: &str = "Carries all legal loads: no posting.";
+
 fn cautions() -> Vec<String> {
     CAUTIONS.iter().map(|caution| (*caution).to_owned()).collect()
 }
@@ -114,7 +116,7 @@ pub fn outcome_tone(outcome: &Outcome) -> Tone {
 
 /// What follows for one vehicle, in a few words.
 #[must_use]
-pub fn limit(limit: Limit, unit: SignUnit) -> String {
+pub fn limit(limit: Limit, unit: WeightUnit) -> String {
     match limit {
         Limit::Full => "no sign".to_owned(),
         Limit::Weight(force) => limit_of(force, unit),
@@ -153,7 +155,7 @@ pub fn verdict(rating: &Rating, system: System) -> Verdict {
 fn headline(rating: &Rating) -> (String, Tone) {
     let safe = &rating.posting.safe;
     match rating.posting.sign {
-        Sign::None => ("Carries all legal loads: no posting.".to_owned(), Tone::Good),
+        Sign::None => (NO_POSTING.to_owned(), Tone::Good),
         Sign::Limit { single_unit, combination, unit } => {
             let text = match (single_unit, combination) {
                 (Some(single), Some(combination)) if single == combination => {
@@ -166,7 +168,7 @@ fn headline(rating: &Rating) -> (String, Tone) {
                 ),
                 (Some(single), None) => format!("Post for single-unit trucks: {}.", signed(single, unit)),
                 (None, Some(combination)) => format!("Post for combinations: {}.", signed(combination, unit)),
-                (None, None) => "Legal trucks pass; vehicles of your own need a limit.".to_owned(),
+                (None, None) => NO_POSTING.to_owned(),
             };
             (text, Tone::Caution)
         }

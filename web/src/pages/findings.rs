@@ -16,7 +16,10 @@ pub(super) fn regions(s: &Scene) -> Vec<Node> {
     }
     let mut add = Node::region("findings.add", "More findings");
     for (i, girder) in s.book.girders.iter().enumerate() {
-        add.c.push(button(format!("Add a finding on {}", girder_name(s.book, i)), format!("findings.add:{}", girder.id.0)));
+        add.c.push(button(
+            format!("Add a finding on {}", girder_name(s.book, i)),
+            format!("findings.add:{}", girder.id.0),
+        ));
     }
     regions.push(add);
     regions.push(ends(s));
@@ -40,7 +43,11 @@ fn one(s: &Scene, finding: &girderbook_core::document::book::Finding, number: us
             .and(s.field(&path("top"), "Top flange left", "mean thickness"))
             .and(s.field(&path("bottom"), "Bottom flange left", "mean thickness"))
             .and(s.field(&path("web"), "Web left", "readings over its height"))
-            .and(s.field(&path("web_low"), "Lowest band of the web left", "the least reading decides at a bearing"))
+            .and(s.field(
+                &path("web_low"),
+                "Lowest band of the web left",
+                "the least reading decides at a bearing",
+            ))
             .and(s.choice(
                 &path("straight"),
                 "Web",

@@ -73,7 +73,11 @@ fn strips(s: &Scene) -> Node {
                     &path("side"),
                     "Stands",
                     "",
-                    &[("both", "one along either edge"), ("left", "along the left edge"), ("right", "along the right edge")],
+                    &[
+                        ("both", "one along either edge"),
+                        ("left", "along the left edge"),
+                        ("right", "along the right edge"),
+                    ],
                 ))
                 .and(s.choice(
                     &path("placed"),

@@ -9,7 +9,8 @@ pub(super) fn regions(s: &Scene) -> Vec<Node> {
     for member in &s.book.members {
         regions.push(kind(s, member));
     }
-    regions.push(Node::region("members.add", "More kinds").and(button("Add a kind of girder", "members.add")));
+    regions
+        .push(Node::region("members.add", "More kinds").and(button("Add a kind of girder", "members.add")));
     if !s.book.girders.is_empty() {
         regions.push(lines(s));
     }
@@ -45,7 +46,11 @@ fn kind(s: &Scene, member: &girderbook_core::document::book::Member) -> Node {
             &path("embedded"),
             "Top flange in the slab",
             "a slab that rests on it is no brace",
-            &[("not-inspected", "not inspected: no brace"), ("yes", "embedded or connected"), ("no", "rests on it")],
+            &[
+                ("not-inspected", "not inspected: no brace"),
+                ("yes", "embedded or connected"),
+                ("no", "rests on it"),
+            ],
         ))
         .and(s.field(&path("brace_spacing"), "Diaphragms", "greatest distance between those that work"));
     let bearing = group(format!("g:members.{id}.bearing"), "Over the bearings")

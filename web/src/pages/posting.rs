@@ -16,10 +16,11 @@ pub(super) fn regions(s: &Scene) -> Vec<Node> {
             if let Some(face) = said.sign {
                 regions.push(Node::region("posting.sign", "Sign").and(crate::drawing::sign::node(&face)));
             }
-            regions.push(
-                Node::region("posting.safe", "Safe loads")
-                    .and(table::node(s, &tables::posting(rating, s.system(), s.sign_unit()), &[])),
-            );
+            regions.push(Node::region("posting.safe", "Safe loads").and(table::node(
+                s,
+                &tables::posting(rating, s.system(), s.sign_unit()),
+                &[],
+            )));
         }
     }
     regions.push(

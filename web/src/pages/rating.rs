@@ -1,5 +1,6 @@
 //! Rating factors, what went into the governing one, and the factors that the user sets.
 
+use girderbook_core::basis::mbe_a::{NAMES, factor_label};
 use girderbook_core::report::tables;
 use girderbook_core::report::verdict::check_name;
 
@@ -14,15 +15,17 @@ pub(super) fn regions(s: &Scene) -> Vec<Node> {
     match s.rating {
         None => regions.push(crate::missing::region(s, "rating.missing")),
         Some(rating) => {
-            regions[0].c.push(quiet(rating.basis_name));
-            regions.push(
-                Node::region("rating.vehicles", "By vehicle")
-                    .and(table::node(s, &tables::by_vehicle(rating, s.system()), &[])),
-            );
-            regions.push(
-                Node::region("rating.girders", "By girder")
-                    .and(table::node(s, &tables::girders(rating, s.system()), &[])),
-            );
+            regions[0].c.push(quiet(s.editions));
+            regions.push(Node::region("rating.vehicles", "By vehicle").and(table::node(
+                s,
+                &tables::by_vehicle(rating, s.system()),
+                &[],
+            )));
+            regions.push(Node::region("rating.girders", "By girder").and(table::node(
+                s,
+                &tables::girders(rating, s.system()),
+                &[],
+            )));
             if let Some(check) = rating.governing.and_then(|i| rating.checks.get(i)) {
                 let figures = tables::check_figures(check, s.system());
                 regions.push(
@@ -64,11 +67,12 @@ fn overrides(s: &Scene) -> Node {
     let mut region = Node::region("rating.overrides", "Your own factors")
         .and(subheading("Your own factors"))
         .and(quiet("In place of the rule set's; the reason is printed beside them."));
+    let names = NAMES.map(|name| (name, factor_label(name)));
     for own in &s.book.overrides {
         let path = |field: &str| format!("overrides.{}.{field}", own.id.0);
         region.c.push(
-            group(format!("g:overrides.{}", own.id.0), "")
-                .and(s.field(&path("factor"), "Factor", "its name in the rule set"))
+            group(format!("g:overrides.{}", own.id.0), own.factor.trim())
+                .and(s.pick(&path("factor"), "Factor", "", &names))
                 .and(s.field(&path("value"), "Value", ""))
                 .and(s.field(&path("reason"), "Reason", ""))
                 .and(remove("Take it out", "overrides", &own.id.0)),

@@ -29,7 +29,8 @@ fn chosen(s: &Scene, rating: &Rating, check: &Check) -> Node {
         .by_vehicle
         .iter()
         .map(|vehicle| option(&key::load(rating, vehicle.load), &tables::load_name(rating, vehicle.load)));
-    let girders = rating.lines.iter().zip(&s.book.girders).map(|(line, girder)| option(&girder.id.0, &line.name));
+    let girders =
+        rating.lines.iter().zip(&s.book.girders).map(|(line, girder)| option(&girder.id.0, &line.name));
     let mut kinds: Vec<(&str, String)> = Vec::new();
     let mut places: Vec<(f64, String)> = Vec::new();
     for other in &rating.checks {
@@ -42,12 +43,12 @@ fn chosen(s: &Scene, rating: &Rating, check: &Check) -> Node {
             kinds.push((kind, words));
         }
         if (other.key.action, other.key.state) == (check.key.action, check.key.state) {
-            let x = key::Key::of(s, rating, other).x.unwrap_or(0.0);
+            let x = key::Key::of(s.book, rating, other).x.unwrap_or(0.0);
             places.push((x, format!("{}: {}", station(other.key.x, s.system()), outcome(&other.outcome))));
         }
     }
     places.sort_by(|(a, _), (b, _)| a.total_cmp(b));
-    let own = key::Key::of(s, rating, check);
+    let own = key::Key::of(s.book, rating, check);
     let choice = |path: &'static str, label: &'static str, value: String| {
         Node::new("choice")
             .named(crate::scene::field_id(path))

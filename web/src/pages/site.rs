@@ -21,7 +21,11 @@ pub(super) fn regions(s: &Scene) -> Vec<Node> {
         Node::region("site.file", "On file")
             .and(super::subheading("On file"))
             .and(s.field("site.year_built", "Year built", "strengths are assumed by it"))
-            .and(s.field("site.condition_rating", "Condition rating", "superstructure, 0 to 9, last inspection"))
+            .and(s.field(
+                "site.condition_rating",
+                "Condition rating",
+                "superstructure, 0 to 9, last inspection",
+            ))
             .and(s.choice(
                 "site.condition",
                 "Condition",

@@ -18,7 +18,8 @@ pub(super) fn regions(s: &Scene) -> Vec<Node> {
                 ("rough", "anything worse"),
             ],
         ));
-    let mut own = Node::region("traffic.own", "Own vehicles").and(subheading("Vehicles of your state or agency"));
+    let mut own =
+        Node::region("traffic.own", "Own vehicles").and(subheading("Vehicles of your state or agency"));
     for vehicle in &s.book.vehicles {
         let path = |field: &str| format!("vehicles.{}.{field}", vehicle.id.0);
         let title = match vehicle.name.trim() {

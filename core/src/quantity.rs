@@ -281,7 +281,7 @@ mod tests {
     fn exact_definitions() {
         assert_eq!(Length::from_inch(1.0), Length::from_mm(25.4));
         assert_eq!(Length::from_ft(1.0), Length::from_mm(304.8));
-        assert_eq!(Force::from_kip(1.0).in_n(), 4448.221_615_260_5);
+        assert_eq!(Force::from_kip(1.0).in_n(), 4_448.221_615_260_5);
         assert_eq!(Length::from_inch(1.0 / 64.0).base(), 254.0 / 64.0);
     }
 

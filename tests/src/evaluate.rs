@@ -42,13 +42,39 @@ mod printed {
 }
 use printed::Printed;
 
+/// `min(a, b)` as `((a) min (b))`: the parser loses count of nested calls.
+fn infix(text: &str) -> String {
+    let call = ["pow(", "min(", "max("]
+        .iter()
+        .filter_map(|name| text.find(name).map(|at| (at, *name)))
+        .min_by_key(|(at, _)| *at);
+    let Some((at, name)) = call else { return text.to_owned() };
+    let body = &text[at + name.len()..];
+    let (mut depth, mut comma) = (0_usize, None);
+    for (i, c) in body.char_indices() {
+        match c {
+            '(' => depth += 1,
+            ',' if depth == 0 => comma = Some(i),
+            ')' if depth == 0 => {
+                let comma = comma.unwrap_or_else(|| panic!("{text}: {name} needs two arguments"));
+                let (a, b) = (infix(&body[..comma]), infix(&body[comma + 1..i]));
+                let op = name.trim_end_matches('(');
+                return format!("{}(({a}) {op} ({b})){}", &text[..at], infix(&body[i + 1..]));
+            }
+            ')' => depth -= 1,
+            _ => {}
+        }
+    }
+    panic!("{text}: {name} is not closed")
+}
+
 /// The value of a printed formula; of a condition 1 where it holds, else 0.
 ///
 /// # Panics
 /// When the text cannot be read, or names a symbol that is not among the inputs.
 #[must_use]
 pub fn evaluate(text: &str, inputs: &[(&str, f64)]) -> f64 {
-    let formula = FlatEx::<f64, Printed>::parse(text).unwrap_or_else(|e| panic!("{text}: {e}"));
+    let formula = FlatEx::<f64, Printed>::parse(&infix(text)).unwrap_or_else(|e| panic!("{text}: {e}"));
     let values: Vec<f64> = formula
         .var_names()
         .iter()
@@ -149,6 +175,7 @@ mod tests {
         near("a - b + c", &[("a", 1.0), ("b", 2.0), ("c", 4.0)], 3.0);
         near("-a - b * pow(c, 2.0)", &[("a", 1.0), ("b", 2.0), ("c", 4.0)], -33.0);
         near("min(max(a, b) * 2.0, 9.0) / b", &[("a", 5.0), ("b", 4.0)], 2.25);
+        near("min(a / pow(b, 2.0), min(a * b, b / 0.5)) - 1.0", &[("a", 64.0), ("b", 4.0)], 3.0);
         near("pow(PI, 2.0)", &[], 9.869_604_401_089_358);
         assert_eq!(evaluate("a + 1.0 <= b * 2.0 && b > a", &[("a", 1.0), ("b", 2.0)]), 1.0);
         assert_eq!(evaluate("a >= b || b < a", &[("a", 1.0), ("b", 2.0)]), 0.0);

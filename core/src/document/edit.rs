@@ -14,7 +14,6 @@ use crate::problem::Problem;
 
 /// What takes a change of a book back: give it to [`Book::apply`].
 #[derive(Clone, Debug, PartialEq)]
-#[must_use]
 pub struct Edit(pub(super) Vec<Step>);
 
 /// One step of an edit.

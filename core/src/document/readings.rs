@@ -3,13 +3,13 @@
 use super::book::{Book, UnitSystem};
 use super::entry::Entry;
 use super::fields::{self, Form, Measure};
-use crate::problem::Problem;
-use crate::quantity::{Dimension, Quantity};
-use crate::units::Entered;
+use crate::problem::{self, Problem};
+use crate::quantity::Quantity;
+use crate::units::{Entered, format, parse};
 
 /// The readings in one text.
 pub(super) fn split(text: &str) -> Vec<String> {
-    text.split(';').map(str::trim).filter(|t| !t.is_empty()).map(str::to_string).collect()
+    parse::split(text)
 }
 
 /// The same readings with `unit` behind every bare figure.
@@ -37,45 +37,36 @@ fn enter<Q: Quantity>(
     measure: Measure,
     system: UnitSystem,
 ) -> Result<Entered<Q>, Vec<Problem>> {
+    let unit = measure.unit(system);
     let mut readings = Vec::new();
+    let mut problems = Vec::new();
     for text in &entry.read {
-        let (figure, unit) = match text.find(|c: char| c.is_ascii_alphabetic() || c == '°') {
-            Some(at) => (text[..at].trim(), text[at..].trim()),
-            None => (text.trim(), measure.unit(system)),
-        };
-        let mut sum = 0.0;
-        for word in figure.split_whitespace() {
-            let number = match word.split_once('/') {
-                Some((a, b)) => a.parse::<f64>().ok().zip(b.parse::<f64>().ok()).map(|(a, b)| a / b),
-                None => word.parse::<f64>().ok(),
-            };
-            let Some(number) = number else {
-                return Err(vec![Problem::error(path, format!("\"{text}\" is no figure"), "write it")]);
-            };
-            sum += number;
+        match parse::readings::<Q>(text, unit) {
+            Err(refusal) => {
+                let problem = Problem::error(path, refusal.message, refusal.mend);
+                problems.push(match refusal.repair {
+                    Some(text) if entry.read.len() == 1 => problem.with_repair(text),
+                    _ => problem,
+                });
+            }
+            Ok(values) => {
+                for value in values {
+                    match measure.limit.check(path, value.base(), text, system.into()) {
+                        Ok(()) => readings.push(value),
+                        Err(problem) => problems.push(problem),
+                    }
+                }
+            }
         }
-        let per = match unit {
-            "mm" => 10.0,
-            "m" => 10_000.0,
-            "in" => 254.0,
-            "ft" => 3048.0,
-            "kN/m" => 0.1,
-            "kN/m3" => 1e-9,
-            "MPa" => 0.01,
-            "ksi" => 4448.221_615_260_5 / 254.0 / 254.0,
-            "kN" => 1000.0,
-            "kip" => 4448.221_615_260_5,
-            "lb/ft" => 4.448_221_615_260_5 / 3048.0,
-            "" | "°" | "deg" => 1.0,
-            _ => return Err(vec![Problem::error(path, format!("\"{unit}\" is no unit"), "write it")]),
-        };
-        let base = sum * per;
-        if !(measure.limit.least..=measure.limit.most).contains(&base) {
-            return Err(vec![Problem::error(path, format!("\"{text}\" out of range"), "check")]);
-        }
-        readings.push(Q::from_base(base));
     }
     let mean = readings.iter().map(|q| q.base()).sum::<f64>() / readings.len() as f64;
+    match problem::finite(mean, path, "the mean of the readings") {
+        Err(problem) if problems.is_empty() => problems.push(problem),
+        _ => {}
+    }
+    if !problems.is_empty() {
+        return Err(problems);
+    }
     Ok(Entered {
         value: Q::from_base(mean),
         readings,
@@ -88,14 +79,5 @@ fn enter<Q: Quantity>(
 
 /// A quantity in the unit of its field.
 pub(super) fn shown<Q: Quantity>(value: Q, measure: Measure, system: UnitSystem) -> String {
-    let unit = measure.unit(system);
-    let per = match (Q::DIMENSION, unit) {
-        (Dimension::Length, "mm") => 10.0,
-        (Dimension::Length, "m") => 10_000.0,
-        (Dimension::Length, "in") => 254.0,
-        (Dimension::Length, "ft") => 3048.0,
-        (Dimension::UnitWeight, "kN/m3") => 1e-9,
-        _ => 1.0,
-    };
-    format!("{:.1} {unit}", value.base() / per)
+    format::show(value, measure.unit(system))
 }

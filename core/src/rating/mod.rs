@@ -11,6 +11,7 @@ mod govern;
 mod line;
 mod rater;
 pub mod result;
+mod sheet;
 mod stations;
 
 pub use crate::check::{Class, Limit, Posting, SafeLoad, Sign};
@@ -18,3 +19,4 @@ pub use rater::Rater;
 pub use result::{
     Capacity, Check, DeadEffects, Factors, Figures, Key, LineSummary, LiveLoad, Rating, VehicleResult,
 };
+pub use sheet::work;

@@ -4,6 +4,7 @@
 //! below it; reinforcement of the slab, fillets and haunch concrete are left out, which is safe.
 //! Symbols are those of AASHTO LRFD table D6.1-1.
 
+use crate::problem::Problem;
 use crate::quantity::{Area, Force, Length, Moment, Stress};
 use crate::units::mark::{In2, Inch, Kip, KipIn, Ksi};
 use crate::worksheet::{Recorder, Val};
@@ -60,6 +61,14 @@ clause! {
     /// Yield force of a plate, kip.
     pub fn yield_force(F_y: Stress [Ksi], A_i: Area [In2]) -> P_i: Force [Kip] { F_y * A_i }
     cite "mechanics" what "force of a plate that yields"
+}
+
+condition! {
+    /// Whether the bottom flange is no stronger than all the rest.
+    pub fn axis_above_bottom(P_t: Force [Kip], P_w: Force [Kip], P_c: Force [Kip], P_s: Force [Kip])
+    { P_t <= P_w + P_c + P_s }
+    cite "equilibrium" yes "the plastic neutral axis lies above the bottom flange"
+    no "the bottom flange outweighs all the rest"
 }
 
 condition! {
@@ -160,8 +169,22 @@ fn no_web_pressed<R: Recorder>(rec: &mut R) -> Val<Length> {
     })
 }
 
-/// Plastic neutral axis and plastic moment, slab in compression.
-pub fn plastic<R: Recorder>(rec: &mut R, f: &Forces) -> Plastic {
+/// Plastic neutral axis and plastic moment, slab in compression; `path` is that of the slab.
+///
+/// # Errors
+/// When the bottom flange outweighs all the rest: table D6.1-1 has no such case.
+pub fn plastic<R: Recorder>(rec: &mut R, f: &Forces, path: &str) -> Result<Plastic, Problem> {
+    if !axis_above_bottom(rec, f.p_t, f.p_w, f.p_c, f.p_s) {
+        return Err(Problem::error(
+            path,
+            "the bottom flange is stronger than slab, top flange and web together",
+            "check slab and flanges; rated without the slab it may do",
+        ));
+    }
+    Ok(above_bottom(rec, f))
+}
+
+fn above_bottom<R: Recorder>(rec: &mut R, f: &Forces) -> Plastic {
     if axis_in_web(rec, f.p_t, f.p_w, f.p_c, f.p_s) {
         let y = depth_in_web(rec, f.web_depth, f.p_t, f.p_c, f.p_s, f.p_w);
         let moment =

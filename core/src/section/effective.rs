@@ -91,6 +91,33 @@ pub struct Effective<'a> {
     pub sound: Option<Properties>,
     /// Outer face of the bottom flange to the toe of the fillet, of what is left.
     pub fillet: Val<Length>,
+    /// Where to look when a plate lies outside the formulas.
+    pub paths: Paths<'a>,
+}
+
+/// Path of the field that each thickness comes from: the finding's where one tells, else the
+/// member's.
+#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+pub struct Paths<'a> {
+    /// Of the top flange.
+    pub top: &'a str,
+    /// Of the web.
+    pub web: &'a str,
+    /// Of the bottom flange.
+    pub bottom: &'a str,
+}
+
+impl<'a> Paths<'a> {
+    fn of(shape: &'a IShape, remains: &Remains<'a>) -> Self {
+        let told = |left: Option<Val<Length>>, entry: &'a Entered<Length>| {
+            if left.is_some() && !remains.path.is_empty() { remains.path } else { entry.path.as_str() }
+        };
+        Self {
+            top: told(remains.top, &shape.top.thickness),
+            web: told(remains.web, &shape.web),
+            bottom: told(remains.bottom, &shape.bottom.thickness),
+        }
+    }
 }
 
 clause! {
@@ -314,7 +341,7 @@ impl<'a> Effective<'a> {
     /// # Errors
     /// When a size is nothing or not finite, when the flanges are thicker than the depth, or when
     /// nothing is left of a plate.
-    pub fn at<R: Recorder>(rec: &mut R, shape: &'a IShape, remains: &Remains) -> Result<Self, Problem> {
+    pub fn at<R: Recorder>(rec: &mut R, shape: &'a IShape, remains: &Remains<'a>) -> Result<Self, Problem> {
         rec.heading("Section as sound");
         let sound = Sound::read(rec, shape)?;
         let fillet = rec.given("k", "outer face of the flange to the toe of the fillet", &shape.fillet, Inch);
@@ -329,6 +356,7 @@ impl<'a> Effective<'a> {
                 left: sound.properties,
                 sound: None,
                 fillet,
+                paths: Paths::of(shape, remains),
             });
         }
         rec.heading("What is left of it");
@@ -338,7 +366,7 @@ impl<'a> Effective<'a> {
     fn worn<R: Recorder>(
         rec: &mut R,
         shape: &'a IShape,
-        remains: &Remains,
+        remains: &Remains<'a>,
         sound: &Sound,
         fillet: Val<Length>,
     ) -> Result<Self, Problem> {
@@ -398,6 +426,7 @@ impl<'a> Effective<'a> {
             left: Properties { area: totals.area, inertia: totals.inertia, s_top, s_bottom, plastic: z },
             sound: Some(sound.properties),
             fillet: counted(rec, fillet, gone_bottom),
+            paths: Paths::of(shape, remains),
         })
     }
 

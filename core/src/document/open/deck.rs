@@ -2,6 +2,7 @@
 
 use super::member::Members;
 use super::reader::{Reader, Wrong};
+use super::site::Year;
 use crate::bridge::{Deck, Layer, Stage, Strip, StripSide};
 use crate::document::book::{Placed, Side, Substance};
 use crate::material::Defaults;
@@ -12,18 +13,16 @@ use crate::units::{Entered, Provenance};
 pub(super) fn deck(
     reader: &mut Reader<'_>,
     members: &Members,
-    year: Option<i32>,
+    year: Year,
     defaults: &dyn Defaults,
 ) -> Option<Deck> {
     let width = reader.needed("deck.width", "measure the deck from edge to edge");
     let roadway = reader.needed("deck.roadway", "measure between the curbs or rails");
     let left_curb = left_curb(reader, width.as_ref(), roadway.as_ref());
     let slab = reader.needed("deck.slab", "drill, core, or take it from the drawing");
-    let strength = reader.or_assumed(
-        "deck.concrete_strength",
-        || defaults.concrete_strength(year),
-        "enter the strength, or the year built, from which one is assumed",
-    );
+    let strength = reader.strength("deck.concrete_strength", "the strength of the concrete", year, |year| {
+        defaults.concrete_strength(year)
+    });
     let unit_weight =
         reader.or_assumed("deck.concrete_weight", || Some(weight::REINFORCED_CONCRETE), "enter it");
     let haunch = reader.needed("deck.haunch", "enter 0 if the slab rests on the flange");

@@ -1,6 +1,7 @@
 //! Kinds of girder: the section as measured or as a table has it, the steel, the bracing.
 
 use super::reader::{Reader, Wrong};
+use super::site::Year;
 use crate::bridge::{Bracing, Composite, Embedded, Member, MemberKind, SteelGirder};
 use crate::document::book::{self, Connectors, Presence};
 use crate::document::entry::Entry;
@@ -15,7 +16,7 @@ use crate::units::Entered;
 pub(super) type Members = Vec<(String, Option<Member>)>;
 
 /// Members that a girder refers to; all of them while there are no girders.
-pub(super) fn members(reader: &mut Reader<'_>, year: Option<i32>, defaults: &dyn Defaults) -> Members {
+pub(super) fn members(reader: &mut Reader<'_>, year: Year, defaults: &dyn Defaults) -> Members {
     let book = reader.book;
     if book.members.is_empty() {
         reader.problems.push(crate::problem::Problem::missing(
@@ -43,16 +44,15 @@ pub(super) fn members(reader: &mut Reader<'_>, year: Option<i32>, defaults: &dyn
 fn member(
     reader: &mut Reader<'_>,
     saved: &book::Member,
-    year: Option<i32>,
+    year: Year,
     defaults: &dyn Defaults,
 ) -> Option<Member> {
     let path = |field: &str| format!("members.{}.{field}", saved.id.0);
     let section = section(reader, saved);
-    let yield_strength = reader.or_assumed(
-        &path("yield_strength"),
-        || defaults.yield_strength(year),
-        "enter it, or the year built, from which it is assumed",
-    );
+    let yield_strength =
+        reader.strength(&path("yield_strength"), "the yield strength of the steel", year, |year| {
+            defaults.yield_strength(year)
+        });
     let spacing = reader.maybe(&path("brace_spacing"));
     if let Ok(None) = spacing {
         reader.note(

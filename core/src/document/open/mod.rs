@@ -13,7 +13,7 @@ mod site;
 mod traffic;
 
 use super::book::{Book, ServicePosting, SignUnit};
-use super::fields;
+use super::fields::Order;
 use crate::bridge::{self, Bridge};
 use crate::material::Defaults;
 use crate::problem::Problem;
@@ -57,8 +57,8 @@ pub struct Filled {
 #[must_use]
 pub fn bridge(book: &Book, defaults: &dyn Defaults) -> Opened {
     let mut reader = Reader::new(book);
-    let site = site::site(&mut reader);
-    let year = site.as_ref().and_then(|site| site.year_built);
+    let year = site::year(&mut reader);
+    let site = site::site(&mut reader, year);
     let span = girders::span(&mut reader);
     let skew = reader.needed("skew", "enter 0 if the supports are square to the road");
     let members = member::members(&mut reader, year, defaults);
@@ -78,9 +78,11 @@ pub fn bridge(book: &Book, defaults: &dyn Defaults) -> Opened {
             ServicePosting::No => Some(false),
         },
     };
+    reader.tell_year();
     let Reader { mut problems, mut filled, .. } = reader;
-    problems.sort_by_key(|problem| fields::rank(book, &problem.path));
-    filled.sort_by_key(|filled| fields::rank(book, &filled.path));
+    let order = Order::of(book);
+    problems.sort_by_cached_key(|problem| order.rank(&problem.path));
+    filled.sort_by_cached_key(|filled| order.rank(&filled.path));
     let blocked = problems.iter().any(Problem::blocks);
     let bridge = (|| {
         Some(Bridge {

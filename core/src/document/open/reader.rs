@@ -1,11 +1,12 @@
 //! Fields one by one, with the problems and defaults met on the way.
 
 use super::Filled;
+use super::site::Year;
 use crate::document::book::Book;
 use crate::document::fields::{self, Form};
 use crate::document::readings;
 use crate::problem::{Problem, Severity};
-use crate::quantity::Quantity;
+use crate::quantity::{Quantity, Stress};
 use crate::units::{Entered, Provenance};
 
 /// A field is wrong, and its problems are told.
@@ -15,11 +16,13 @@ pub(super) struct Reader<'a> {
     pub(super) book: &'a Book,
     pub(super) problems: Vec<Problem>,
     pub(super) filled: Vec<Filled>,
+    /// Strengths that could have been assumed, had the year been entered.
+    lacking: Vec<&'static str>,
 }
 
 impl<'a> Reader<'a> {
     pub(super) fn new(book: &'a Book) -> Self {
-        Self { book, problems: Vec::new(), filled: Vec::new() }
+        Self { book, problems: Vec::new(), filled: Vec::new(), lacking: Vec::new() }
     }
 
     /// The entry at a path, or none where nothing was entered.
@@ -63,6 +66,45 @@ impl<'a> Reader<'a> {
                     None
                 }
             },
+        }
+    }
+
+    /// The strength at a path, or the one that is assumed by the year built.
+    pub(super) fn strength(
+        &mut self,
+        path: &str,
+        what: &'static str,
+        year: Year,
+        by_year: impl FnOnce(Option<i32>) -> Option<(Stress, &'static str)>,
+    ) -> Option<Entered<Stress>> {
+        match self.maybe(path) {
+            Ok(Some(entered)) => Some(entered),
+            Err(Wrong) => None,
+            Ok(None) => match (by_year(year.known()), year) {
+                (Some((value, source)), _) => Some(self.assume(path, value, source)),
+                (None, Year::Built(_)) => {
+                    self.missing(path, "enter it: none is known for that year");
+                    None
+                }
+                (None, Year::NotEntered) => {
+                    if !self.lacking.contains(&what) {
+                        self.lacking.push(what);
+                    }
+                    None
+                }
+                (None, Year::Wrong) => None,
+            },
+        }
+    }
+
+    /// Asks once for the year built, where a strength waits for it.
+    pub(super) fn tell_year(&mut self) {
+        if !self.lacking.is_empty() {
+            let mend = format!(
+                "enter it: strengths that were not tested are assumed by the year; or enter {}",
+                self.lacking.join(" and ")
+            );
+            self.missing("site.year_built", &mend);
         }
     }
 

@@ -5,9 +5,29 @@ use crate::bridge::{ConditionRating, Site};
 use crate::document::book::Condition;
 use crate::limits;
 
-pub(super) fn site(reader: &mut Reader<'_>) -> Option<Site> {
+/// The year built, which strengths are assumed by.
+#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+pub(super) enum Year {
+    /// Entered.
+    Built(i32),
+    /// Not entered.
+    NotEntered,
+    /// Entered wrongly, which is told.
+    Wrong,
+}
+
+impl Year {
+    /// The year, where it is known.
+    pub(super) fn known(self) -> Option<i32> {
+        match self {
+            Self::Built(year) => Some(year),
+            Self::NotEntered | Self::Wrong => None,
+        }
+    }
+}
+
+pub(super) fn site(reader: &mut Reader<'_>, year: Year) -> Option<Site> {
     let saved = &reader.book.site;
-    let year_built = year(reader);
     let rated = rating(reader);
     let chosen = match saved.condition {
         Condition::NotKnown => None,
@@ -37,7 +57,7 @@ pub(super) fn site(reader: &mut Reader<'_>) -> Option<Site> {
     Some(Site {
         name: saved.name.trim().to_string(),
         place,
-        year_built: year_built?,
+        year_built: year.known(),
         condition: chosen.or(rated?),
         rater: saved.rater.trim().to_string(),
         checker: saved.checker.trim().to_string(),
@@ -46,21 +66,20 @@ pub(super) fn site(reader: &mut Reader<'_>) -> Option<Site> {
     })
 }
 
-/// The year, `Some(None)` where none was entered, `None` where it is wrong.
-fn year(reader: &mut Reader<'_>) -> Option<Option<i32>> {
+pub(super) fn year(reader: &mut Reader<'_>) -> Year {
     let text = reader.book.site.year_built.trim();
     if text.is_empty() {
-        return Some(None);
+        return Year::NotEntered;
     }
     match text.parse::<i32>() {
-        Ok(year) if limits::YEARS.contains(&year) => Some(Some(year)),
+        Ok(year) if limits::YEARS.contains(&year) => Year::Built(year),
         _ => {
             reader.error(
                 "site.year_built",
                 format!("\"{text}\" is not a year from {} to {}", limits::YEARS.start(), limits::YEARS.end()),
                 "write the year in four figures, such as 1958",
             );
-            None
+            Year::Wrong
         }
     }
 }

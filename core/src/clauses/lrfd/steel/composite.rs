@@ -179,7 +179,7 @@ pub fn nominal_moment<R: Recorder>(rec: &mut R, case: &CompositeCase) -> Result<
     let e = material::steel_modulus(rec);
     let r_h = web::hybrid_factor(rec);
     let forces = forces(rec, section, case.f_y);
-    let p = plastic(rec, &forces);
+    let p = plastic(rec, &forces, section.slab.path)?;
     if !ductile(rec, p.d_p, section.total_depth) {
         return Err(Problem::error(
             section.slab.path,

@@ -41,7 +41,11 @@ impl Hold {
 
 /// The section seen from its compression flange.
 #[derive(Clone, Copy, Debug)]
-pub struct Pressed {
+pub struct Pressed<'a> {
+    /// Path of the compression flange's thickness, for messages.
+    pub path_c: &'a str,
+    /// Path of the tension flange's thickness.
+    pub path_t: &'a str,
     /// Width of the compression flange.
     pub b_fc: Val<Length>,
     /// Thickness of the compression flange.
@@ -109,12 +113,12 @@ clause! {
     cite "AASHTO LRFD 9th ed. 6.10.2.2" what "tension flange about the vertical axis"
 }
 
-impl Pressed {
+impl<'a> Pressed<'a> {
     /// The section with that edge in compression.
     ///
     /// # Errors
     /// When an axis lies outside the web: the section is no I-section in bending then.
-    pub fn of<R: Recorder>(rec: &mut R, section: &Effective, edge: Edge) -> Result<Self, Problem> {
+    pub fn of<R: Recorder>(rec: &mut R, section: &Effective<'a>, edge: Edge) -> Result<Self, Problem> {
         let p = &section.plates;
         let (b_fc, t_fc, b_ft, t_ft, s_xc, s_xt) = match edge {
             Edge::Top => {
@@ -123,6 +127,10 @@ impl Pressed {
             Edge::Bottom => {
                 (p.b_bottom, p.t_bottom, p.b_top, p.t_top, section.left.s_bottom, section.left.s_top)
             }
+        };
+        let (path_c, path_t) = match edge {
+            Edge::Top => (section.paths.top, section.paths.bottom),
+            Edge::Bottom => (section.paths.bottom, section.paths.top),
         };
         let (d_c, d_cp) = match edge {
             Edge::Top => (
@@ -136,12 +144,12 @@ impl Pressed {
         };
         if d_c.q <= Length::ZERO || d_c.q >= p.web_depth.q {
             return Err(Problem::error(
-                section.shape.top.thickness.path.clone(),
+                path_c,
                 "one flange outweighs the other so far that the neutral axis leaves the web",
                 "check the flanges; a section like this needs its own study",
             ));
         }
         let h = between_flanges(rec, p.web_depth, t_fc, t_ft);
-        Ok(Self { b_fc, t_fc, b_ft, t_ft, s_xc, s_xt, d_c, d_cp, h })
+        Ok(Self { path_c, path_t, b_fc, t_fc, b_ft, t_ft, s_xc, s_xt, d_c, d_cp, h })
     }
 }

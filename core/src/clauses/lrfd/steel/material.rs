@@ -38,11 +38,17 @@ clause! {
     cite "AASHTO LRFD 9th ed. 6.10.1.1.1b, from memory" what "modular ratio for permanent load"
 }
 
+/// A strength in ksi as it was entered: a table's limit must not be missed by the last digit of a
+/// conversion.
+fn figure(f_c: Val<Stress>) -> f64 {
+    (f_c.q.in_ksi() * 1e9).round() / 1e9
+}
+
 /// Unit weight of plain normal-weight concrete, for its modulus: 0.145 kcf up to 5 ksi, above that
 /// 0.140 + 0.001 f'c kcf (table 3.5.1-1, from memory).
 pub fn concrete_weight<R: Recorder>(rec: &mut R, f_c: Val<Stress>) -> Val<UnitWeight> {
     const CITE: &str = "AASHTO LRFD 9th ed. table 3.5.1-1 (from memory)";
-    let strength = f_c.q.in_ksi();
+    let strength = figure(f_c);
     let (weight, row) = if strength <= 5.0 {
         (0.145, "normal weight, f'c up to 5.0 ksi")
     } else {
@@ -66,7 +72,7 @@ pub fn modular_ratio<R: Recorder>(rec: &mut R, f_c: Val<Stress>, path: &str) -> 
         (6.0, 7.0, "4.6 <= f'c < 6.0 ksi"),
         (15.0, 6.0, "6.0 ksi <= f'c"),
     ];
-    let strength = f_c.q.in_ksi();
+    let strength = figure(f_c);
     if !(1.0..=15.0).contains(&strength) {
         return Err(Problem::error(
             path,

@@ -107,7 +107,7 @@ pub fn nominal_moment<R: Recorder>(rec: &mut R, case: &FlexureCase) -> Result<Va
 /// What both ways need.
 struct Work<'a> {
     case: &'a FlexureCase<'a>,
-    pressed: Pressed,
+    pressed: Pressed<'a>,
     class: WebClass,
     lambda_f: Val<f64>,
     e: Val<Stress>,

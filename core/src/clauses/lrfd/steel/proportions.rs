@@ -83,7 +83,7 @@ pub fn web<R: Recorder>(rec: &mut R, section: &Effective) -> Result<Val<f64>, Pr
         return Ok(ratio);
     }
     Err(Problem::error(
-        section.shape.web.path.clone(),
+        section.paths.web,
         "the web is more slender than 150, beyond the formulas for webs without longitudinal stiffeners",
         "check the web's thickness and depth; a web like this needs its own study",
     ))
@@ -109,11 +109,11 @@ pub fn flexure<R: Recorder>(rec: &mut R, section: &Effective, pressed: &Pressed)
     let p = &section.plates;
     let slenderness = flange_ratio(rec, pressed.b_fc, pressed.t_fc);
     let tension = flange_ratio(rec, pressed.b_ft, pressed.t_ft);
-    for ratio in [slenderness, tension] {
+    for (ratio, path) in [(slenderness, pressed.path_c), (tension, pressed.path_t)] {
         if !flange_ratio_holds(rec, ratio) {
             return Err(Problem::error(
-                section.shape.top.thickness.path.clone(),
-                "a flange is more than 24 times as wide as it is thick, beyond the formulas",
+                path,
+                "the flange is more than 24 times as wide as it is thick, beyond the formulas",
                 "check width and thickness left of the flanges",
             ));
         }
@@ -124,7 +124,7 @@ pub fn flexure<R: Recorder>(rec: &mut R, section: &Effective, pressed: &Pressed)
     let i_yt = lateral_inertia_tension(rec, pressed.t_ft, pressed.b_ft);
     if !flanges_alike(rec, i_yc, i_yt) {
         return Err(Problem::error(
-            section.shape.top.thickness.path.clone(),
+            pressed.path_c,
             "one flange is more than ten times as stiff sideways as the other, beyond the formulas",
             "check width and thickness left of the flanges",
         ));

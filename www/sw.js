@@ -1,0 +1,46 @@
+// Keeps the page, so that it opens with no network. The build fills in the next three lines.
+/** @type {{path: string, integrity: string, size: number}[]} */
+const FILES = [];
+const VERSION = "";
+const POLICY = "";
+
+const worker = /** @type {ServiceWorkerGlobalScope} */ (/** @type {unknown} */ (self));
+const CACHE = `girderbook ${VERSION}`;
+
+/** @param {Response} response */
+async function withPolicy(response) {
+  const headers = new Headers(response.headers);
+  headers.set('Content-Security-Policy', POLICY);
+  return new Response(await response.blob(), { status: response.status, headers });
+}
+
+/** Whole or not at all: one file that is missing or changed, and the old version stays. */
+async function keep() {
+  const cache = await caches.open(CACHE);
+  for (const { path, integrity } of FILES) {
+    const response = await fetch(new Request(path, { cache: 'reload', integrity }));
+    if (!response.ok) throw new Error(`${path}: ${response.status}`);
+    await cache.put(path, await withPolicy(response));
+  }
+}
+
+async function sweep() {
+  for (const name of await caches.keys()) {
+    if (name !== CACHE) await caches.delete(name);
+  }
+  await worker.clients.claim();
+}
+
+/** @param {Request} request */
+async function answer(request) {
+  const path = new URL(request.url).pathname;
+  const wanted = path.endsWith('/') ? `${path}index.html` : path;
+  const cache = await caches.open(CACHE);
+  return (await cache.match(wanted)) ?? fetch(request);
+}
+
+worker.addEventListener('install', (event) => event.waitUntil(keep()));
+worker.addEventListener('activate', (event) => event.waitUntil(sweep()));
+worker.addEventListener('fetch', (event) => {
+  if (event.request.method === 'GET') event.respondWith(answer(event.request));
+});

@@ -20,6 +20,7 @@ pub mod numerics;
 pub mod problem;
 pub mod quantity;
 pub mod rating;
+pub mod report;
 pub mod resistance;
 pub mod section;
 pub mod share;

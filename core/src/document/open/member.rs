@@ -1,12 +1,11 @@
 //! Kinds of girder: the section as measured or as a table has it, the steel, the bracing.
 
-use super::Defaults;
 use super::reader::{Reader, Wrong};
 use super::site::Year;
 use crate::bridge::{Bracing, Composite, Embedded, Member, MemberKind, SteelGirder};
 use crate::document::book::{self, Connectors, Presence};
 use crate::document::entry::Entry;
-use crate::material::Steel;
+use crate::material::{Defaults, Steel};
 use crate::quantity::Length;
 use crate::section::plate::{Flange, IShape, Published};
 use crate::section::rolled::{self, Rolled};

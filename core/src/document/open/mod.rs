@@ -15,18 +15,10 @@ mod traffic;
 use super::book::{Book, ServicePosting, SignUnit};
 use super::fields::Order;
 use crate::bridge::{self, Bridge};
+use crate::material::Defaults;
 use crate::problem::Problem;
-use crate::quantity::Stress;
-use crate::units::Provenance;
+use crate::units::{Provenance, WeightUnit};
 use reader::Reader;
-
-/// Strengths that hold where none was entered, by the rules in force.
-pub trait Defaults {
-    /// Yield strength of structural steel by year built, and where it is known from.
-    fn yield_strength(&self, year: Option<i32>) -> Option<(Stress, &'static str)>;
-    /// Compressive strength of concrete by year built, and where it is known from.
-    fn concrete_strength(&self, year: Option<i32>) -> Option<(Stress, &'static str)>;
-}
 
 /// What a book says.
 #[derive(Clone, Debug, PartialEq)]
@@ -77,8 +69,8 @@ pub fn bridge(book: &Book, defaults: &dyn Defaults) -> Opened {
     let vehicles = traffic::vehicles(&mut reader);
     let posting = bridge::Posting {
         sign: match book.posting.unit {
-            SignUnit::ShortTons => bridge::SignUnit::ShortTons,
-            SignUnit::Tonnes => bridge::SignUnit::Tonnes,
+            SignUnit::ShortTons => WeightUnit::ShortTons,
+            SignUnit::Tonnes => WeightUnit::Tonnes,
         },
         service_governs: match book.posting.service {
             ServicePosting::RuleSet => None,

@@ -7,7 +7,7 @@ use super::spread::Spread;
 use super::{AxlePolicy, Direction, Extremes, Governing, Peak, Peaks, Sense};
 use crate::influence::InfluenceLine;
 use crate::load::AxleTrain;
-use crate::numerics::Piecewise;
+use crate::numerics::{Cubic, Piecewise};
 use crate::problem::{Problem, finite};
 use crate::quantity::{Length, Quantity};
 
@@ -156,17 +156,18 @@ impl Workspace {
             if !wanted[sense] {
                 continue;
             }
-            // Left out, relieving axles leave the part of the line that has the sign sought.
-            let mut part = core::mem::take(&mut self.part);
-            if wanted[1 - sense] {
-                f.part_into(SIGN[sense], &mut part);
-            } else {
-                part.clone_from(f);
+            // The part of the line that has the sign sought: all of it where it has no other.
+            if !wanted[1 - sense] {
+                self.seek(f, f, &case, sense, &mut peaks, keep)?;
+                continue;
             }
-            let done = match policy {
-                AxlePolicy::AllCount => self.seek(f, &part, &case, sense, &mut peaks, keep),
-                AxlePolicy::NeglectRelieving => self.seek(&part, &part, &case, sense, &mut peaks, keep),
+            let mut part = core::mem::take(&mut self.part);
+            f.part_into(SIGN[sense], &mut part);
+            let line = match policy {
+                AxlePolicy::AllCount => f,
+                AxlePolicy::NeglectRelieving => &part,
             };
+            let done = self.seek(line, &part, &case, sense, &mut peaks, keep);
             self.part = part;
             done?;
         }
@@ -240,7 +241,7 @@ impl Workspace {
 
 impl Case {
     /// Nothing may be left after the last axle has gone.
-    fn check(&self, rest: &crate::numerics::Cubic) -> Result<(), Problem> {
+    fn check(&self, rest: &Cubic) -> Result<(), Problem> {
         let left = rest.0.iter().rev().fold(0.0, |sum, c| sum * self.reach + c.abs());
         if left <= RESIDUE * self.scale { Ok(()) } else { Err(failed()) }
     }

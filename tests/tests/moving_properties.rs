@@ -423,6 +423,23 @@ fn axles_on_both_supports_count_in_full() {
     }
 }
 
+/// What is below 1e-11 of the peak is round-off: 0, and no position is given for it.
+#[test]
+fn next_to_nothing_is_nothing() {
+    let pieces = vec![Cubic::constant(-1.0), Cubic::constant(1e-12), Cubic::constant(1e-10)];
+    for (last, some) in [(2, false), (3, true)] {
+        let knots = (0..=last).map(|i| f64::from(i) * 1e4).collect();
+        let f = Piecewise::new(knots, pieces[..last as usize].to_vec()).expect("well formed");
+        let line = InfluenceLine::new(LineKind::Reaction { support: 0 }, f);
+        let train = made("one", vec![Force::from_kn(100.0)], vec![]);
+        for policy in POLICIES {
+            let found = extremes(&line, &train, policy).expect("finite").max;
+            assert_eq!(found.position.is_some(), some);
+            assert_eq!(found.value > 0.0, some);
+        }
+    }
+}
+
 /// At a shear's cut a relieving axle that can be moved off by a variable spacing is moved off.
 #[test]
 fn a_variable_spacing_is_opened_where_that_is_worse() {

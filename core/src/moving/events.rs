@@ -86,11 +86,10 @@ fn walk<const STRAIGHT: bool>(
     heads: &mut Heads,
 ) -> Swept {
     let jumps = f.jumps();
-    // The effect as a polynomial about `place`, and its one-sided value before the event there.
-    // Nothing is on the bridge before the first event.
-    let (mut effect, mut place, mut before) = (Cubic::ZERO, f.knots()[0] + offsets[0], 0.0);
-    // What axles at a jump add when each counts at the side that is worse.
-    let (mut up, mut down) = (0.0, 0.0);
+    // The effect as a polynomial about `place`: nothing is on the bridge before the first event.
+    let (mut effect, mut place) = (Cubic::ZERO, f.knots()[0] + offsets[0]);
+    // The values at `place` when each axle at a jump counts at its larger or at its smaller side.
+    let (mut high, mut low) = (0.0, 0.0);
     let (mut most, mut least) = ((0.0, 0.0), (0.0, 0.0));
     for (p, knot, axle) in Events::new(f.knots(), offsets, heads) {
         let h = p - place;
@@ -112,7 +111,7 @@ fn walk<const STRAIGHT: bool>(
                 }
                 effect = effect.about(h);
             }
-            (place, before, up, down) = (p, effect.0[0], 0.0, 0.0);
+            (place, high, low) = (p, effect.0[0], effect.0[0]);
         }
         let (load, jump) = (loads[axle], &jumps[knot].0);
         let step = load * jump[0];
@@ -122,16 +121,13 @@ fn walk<const STRAIGHT: bool>(
             effect.0[2] += load * jump[2];
             effect.0[3] += load * jump[3];
         }
-        if step > 0.0 {
-            up += step
-        } else {
-            down += step
+        high += step.max(0.0);
+        low += step.min(0.0);
+        if high > most.0 {
+            most = (high, place);
         }
-        if before + up > most.0 {
-            most = (before + up, place);
-        }
-        if before + down < least.0 {
-            least = (before + down, place);
+        if low < least.0 {
+            least = (low, place);
         }
     }
     Swept { most, least, rest: effect }

@@ -426,7 +426,7 @@ fn axles_on_both_supports_count_in_full() {
 /// What is below 1e-11 of the peak is round-off: 0, and no position is given for it.
 #[test]
 fn next_to_nothing_is_nothing() {
-    let pieces = vec![Cubic::constant(-1.0), Cubic::constant(1e-12), Cubic::constant(1e-10)];
+    let pieces = [Cubic::constant(-1.0), Cubic::constant(1e-12), Cubic::constant(1e-10)];
     for (last, some) in [(2, false), (3, true)] {
         let knots = (0..=last).map(|i| f64::from(i) * 1e4).collect();
         let f = Piecewise::new(knots, pieces[..last as usize].to_vec()).expect("well formed");

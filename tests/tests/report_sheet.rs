@@ -150,6 +150,14 @@ fn a_line_referred_to_prints_the_same_figure() {
 }
 
 #[test]
+fn symbols_have_their_greek_letters() {
+    use girderbook_core::report::sheet::symbol;
+    for (name, letter) in [("gamma_DC", "γ_DC"), ("eta", "η"), ("phi", "φ"), ("M_n", "M_n"), ("t", "t")] {
+        assert_eq!(symbol(name), letter);
+    }
+}
+
+#[test]
 fn the_unit_stands_once_beside_each_symbol() {
     clause! {
         fn twice(a: Length [Inch], F: Stress [Ksi]) -> R: f64 [One] { a / (a + 1.0) * F / (F + a) }

@@ -127,6 +127,25 @@ fn a_bridge_to_be_posted() {
 }
 
 #[test]
+fn the_next_one_behind_is_another_place_or_action() {
+    let mut rating = rating();
+    rating.next = vec![5, 2, 1];
+    let reasons = verdict(&rating, FootKip).reasons;
+    assert_eq!(reasons[1], "Next behind it: SU7 on G2, Strength I, bending at 30.0 ft, 0.91.");
+}
+
+#[test]
+fn a_bearing_is_the_near_or_the_far_one() {
+    let mut rating = rating();
+    rating.checks[0].key.action = Action::Bearing;
+    rating.checks[0].key.state = LimitState::StrengthI;
+    let caption = |rating: &Rating| verdict(rating, MetreKilonewton).caption;
+    assert_eq!(caption(&rating), "least rating factor: SU7 on G2, Strength I, web over the far bearing");
+    rating.checks[0].key.x = Length::ZERO;
+    assert_eq!(caption(&rating), "least rating factor: SU7 on G2, Strength I, web over the near bearing");
+}
+
+#[test]
 fn every_verdict_carries_every_caution() {
     let all = CAUTIONS.join(" ");
     for word in [
@@ -215,11 +234,11 @@ fn the_table_by_vehicle() {
         text(&table),
         "\
 Rating factor by vehicle
-Vehicle          Weight  Strength I  Service II  Rules                       Rating weight
-HL-93 inventory                0.71  none        G1, bending, 9.14 m
-Type 3           22.7 t  none              1.21  G2, bending stress, 9.14 m         27.5 t
-Type 3S2         32.7 t  none              1.17  G1, bending stress, 9.14 m         38.3 t
-SU7              35.2 t        0.91        0.81  G2, bending stress, 9.14 m         28.8 t
+Vehicle          Weight  Strength I  Service II  Rules                         Rating weight
+HL-93 inventory                0.71  none        G1, bending at 9.14 m
+Type 3           22.7 t  none              1.21  G2, bending stress at 9.14 m         27.5 t
+Type 3S2         32.7 t  none              1.17  G1, bending stress at 9.14 m         38.3 t
+SU7              35.2 t        0.91        0.81  G2, bending stress at 9.14 m         28.8 t
 "
     );
     let su7 = &table.rows[3];
@@ -243,8 +262,8 @@ G2      12.78  1.82  3.48  18.09
         "\
 Share of a lane and least legal factor of each girder
 Girder  Moment  Shear      Least  Of
-G1       0.648  no number   1.17  Type 3S2, bending stress, 30.0 ft
-G2       0.648  no number   0.81  SU7, bending stress, 30.0 ft
+G1       0.648  no number   1.17  Type 3S2, bending stress at 30.0 ft
+G2       0.648  no number   0.81  SU7, bending stress at 30.0 ft
 "
     );
     assert_eq!(

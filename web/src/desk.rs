@@ -4,11 +4,13 @@
 
 use girderbook_core::basis::mbe_a::MbeA;
 use girderbook_core::basis::{Basis, Case};
+use girderbook_core::bridge::{Bridge, Site};
 use girderbook_core::document::book::UnitSystem;
 use girderbook_core::document::{self, Book, Edit, Opened};
 use girderbook_core::problem::Problem;
-use girderbook_core::rating::{Rater, Rating};
+use girderbook_core::rating::{Rater, Rating, work};
 use girderbook_core::report::{SheetRow, Tone, rows};
+use girderbook_core::worksheet::Sheet;
 
 use crate::key::Key;
 use crate::node::{Update, View};
@@ -39,6 +41,25 @@ pub struct Desk {
     undo: Vec<(String, Edit)>,
     revision: u32,
     view: View,
+}
+
+/// Whether two bridges differ in nothing but the words about the site, of which none enters a figure.
+/// Taken apart field by field, so that a new field has to say on which side it is.
+fn same_but_words(a: &Bridge, b: &Bridge) -> bool {
+    let Bridge { site, spans, skew, deck, members, lines, findings, traffic, vehicles, posting } = a;
+    let Site {
+        name: _,
+        place: _,
+        year_built,
+        condition,
+        rater: _,
+        checker: _,
+        posting_before: _,
+        rating_before: _,
+    } = site;
+    (year_built, condition) == (&b.site.year_built, &b.site.condition)
+        && (spans, skew, deck, members, lines) == (&b.spans, &b.skew, &b.deck, &b.members, &b.lines)
+        && (findings, traffic, vehicles, posting) == (&b.findings, &b.traffic, &b.vehicles, &b.posting)
 }
 
 /// A line of the shelf.
@@ -179,8 +200,14 @@ impl Desk {
     }
 
     fn reopen(&mut self) {
-        self.opened = document::bridge(&self.book, &self.basis);
-        self.rate();
+        let before = core::mem::replace(&mut self.opened, document::bridge(&self.book, &self.basis));
+        match (&before.bridge, &self.opened.bridge) {
+            // Names and notes enter no figure.
+            (Some(before), Some(now)) if same_but_words(before, now) && self.rating.is_some() => {
+                self.problems.clone_from(&self.opened.problems);
+            }
+            _ => self.rate(),
+        }
     }
 
     fn rate(&mut self) {
@@ -229,9 +256,12 @@ impl Desk {
         let sheet = || {
             let (bridge, rating) = (self.opened.bridge.as_ref()?, self.rating.as_ref()?);
             let check = rating.checks.get(self.shown()?)?;
-            girderbook_core::rating::work(bridge, &self.basis, &check.key).ok()
+            let mut sheet = Sheet::default();
+            // Where there is no number the sheet itself says why.
+            let _ = work(bridge, &self.basis, &check.key, &mut sheet);
+            Some(rows(&sheet, self.book.system.into()))
         };
-        sheet().map_or(Vec::new(), |sheet| rows(&sheet, self.book.system.into()))
+        sheet().unwrap_or_default()
     }
 
     fn update(&mut self) -> Update {

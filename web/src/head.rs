@@ -52,13 +52,13 @@ pub fn regions(s: &Scene) -> Vec<Node> {
         UnitSystem::MetreKilonewton => "m · kN",
         UnitSystem::FootKip => "ft · kip",
     };
-    let mut region = Node::region("head", "Bridge")
+    // What can be taken back comes and goes; the button stays in its place.
+    let undo = if s.undo { "undo" } else { "" };
+    let region = Node::region("head", "Bridge")
         .and(Node::new("heading").with("text", title(s.book)).with("level", "2"))
         .and(Node::new("text").with("text", about.join(" · ")).with("tone", "quiet"))
         .and(Node::new("link").with("text", units).with("go", "system"))
-        .and(Node::new("link").with("text", s.rules).with("go", "rule_set"));
-    if s.undo {
-        region = region.and(Node::new("button").with("text", "Undo").with("act", "undo"));
-    }
+        .and(Node::new("link").with("text", s.rules).with("go", "rule_set"))
+        .and(Node::new("button").named("head.undo").with("text", "Undo").with("act", undo));
     vec![region]
 }

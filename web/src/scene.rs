@@ -92,7 +92,10 @@ impl<'a> Scene<'a> {
             _ => "",
         };
         let echo = match (filled, measure) {
-            (Some(filled), _) => format!("{} {}", provenance(filled.from), filled.text),
+            (Some(filled), _) if filled.from == Provenance::Assumed => {
+                format!("assumed {}", raised(&filled.text))
+            }
+            (Some(filled), _) => format!("by the table {}", raised(&filled.text)),
             (None, Some(measure)) => self.echo(path, measure),
             (None, None) => String::new(),
         };
@@ -180,17 +183,14 @@ impl<'a> Scene<'a> {
     #[must_use]
     pub fn assumed(&self) -> Vec<String> {
         let filled = self.opened.filled.iter().filter(|filled| filled.from == Provenance::Assumed);
-        let mut all: Vec<(String, String)> =
-            filled.map(|filled| (filled.path.clone(), filled.text.clone())).collect();
-        for field in fields::fields(self.book) {
-            let view = self.view(&field.path);
-            if view.from == Some(Origin::Assumed) && !view.text.is_empty() {
-                all.push((field.path, view.text));
+        let named = |path: &str, text: &str| format!("{} {text}", fields::label(path).to_lowercase());
+        let mut all: Vec<String> = filled.map(|filled| named(&filled.path, &raised(&filled.text))).collect();
+        self.book.entries(&mut |path, entry| {
+            if entry.from == Origin::Assumed && !entry.is_blank() {
+                all.push(named(path, &entry.text()));
             }
-        }
-        all.into_iter()
-            .map(|(path, text)| format!("{} {text}", fields::label(&path).to_lowercase()))
-            .collect()
+        });
+        all
     }
 
     fn view(&self, path: &str) -> FieldView {
@@ -309,6 +309,14 @@ fn provenance(from: Provenance) -> &'static str {
     }
 }
 
+/// A size as the book shows it, with its unit as it is printed.
+fn raised(text: &str) -> String {
+    match text.split_once(' ') {
+        Some((figure, unit)) => format!("{figure} {}", girderbook_core::report::figure::unit(unit)),
+        None => text.to_owned(),
+    }
+}
+
 fn mode(path: &str, form: Option<Form>) -> &'static str {
     match form {
         Some(Form::Quantity(Measure { dimension: Dimension::Length, .. })) => "length",
@@ -339,7 +347,7 @@ impl Told {
                         told.repair = problem.repair.clone().unwrap_or_default();
                     }
                 }
-                Severity::Missing => told.note.push(format!("needed for a rating: {}", problem.mend)),
+                Severity::Missing => told.note.push("needed for a rating".to_owned()),
                 Severity::Note => told.note.push(problem.message.clone()),
             }
         }

@@ -37,7 +37,7 @@ pub fn regions(s: &Scene) -> Vec<Node> {
         words,
     ];
     if s.rating.is_none() {
-        regions.push(crate::missing::region(s, "verdict.missing"));
+        regions.push(crate::missing::next(s, "verdict.missing"));
     }
     if let Some(face) = &said.sign {
         regions.push(Node::region("verdict.sign", "Sign").and(drawing::sign::node(face)));

@@ -166,6 +166,15 @@ impl Book {
         part.leaf()
     }
 
+    /// Visits every entry with its path, in the order of the saved form.
+    pub fn entries(&self, see: &mut dyn FnMut(&str, &Entry)) {
+        self.visit("", &mut |path, leaf| {
+            if let Leaf::Entry(entry) = leaf {
+                see(path, entry);
+            }
+        });
+    }
+
     /// The readings at a path.
     pub(super) fn entry(&self, path: &str) -> Option<&Entry> {
         match self.leaf(path)? {

@@ -20,12 +20,6 @@ pub fn printed(text: &str, name: &mut dyn FnMut(&str) -> String) -> String {
     out
 }
 
-/// The same with its symbols.
-#[must_use]
-pub fn with_symbols(text: &str) -> String {
-    printed(text, &mut |symbol| symbol.to_owned())
-}
-
 fn tokens(text: &str) -> Vec<&str> {
     let mut out = Vec::new();
     let bytes = text.as_bytes();
@@ -172,6 +166,10 @@ fn literal(token: &str) -> String {
 #[cfg(test)]
 mod tests {
     use super::*;
+
+    fn with_symbols(text: &str) -> String {
+        printed(text, &mut |symbol| symbol.to_owned())
+    }
 
     #[test]
     fn formulas_look_as_in_print() {

@@ -6,7 +6,7 @@
 
 use super::convert::converted;
 use super::figure::{figure, with_unit};
-use super::formula::{printed, with_symbols};
+use super::formula::printed;
 use crate::units::{Provenance, System};
 use crate::worksheet::{Input, Kind, Line, LineNo, Sheet};
 
@@ -93,7 +93,7 @@ fn row(line: &Line, no: u32, system: System) -> SheetRow {
         no,
         from: From::Remark,
         what: line.what.clone(),
-        symbol: line.symbol.clone(),
+        symbol: symbol(&line.symbol),
         formula: String::new(),
         numbers: String::new(),
         result: String::new(),
@@ -163,6 +163,40 @@ fn row(line: &Line, no: u32, system: System) -> SheetRow {
         row.also = with_unit(value, unit);
     }
     row
+}
+
+/// A symbol with its Greek letters: `gamma_DC` as `γ_DC`.
+#[must_use]
+pub fn symbol(name: &str) -> String {
+    const GREEK: [(&str, char); 16] = [
+        ("alpha", 'α'),
+        ("beta", 'β'),
+        ("gamma", 'γ'),
+        ("delta", 'δ'),
+        ("epsilon", 'ε'),
+        ("eta", 'η'),
+        ("theta", 'θ'),
+        ("kappa", 'κ'),
+        ("lambda", 'λ'),
+        ("mu", 'μ'),
+        ("nu", 'ν'),
+        ("rho", 'ρ'),
+        ("sigma", 'σ'),
+        ("tau", 'τ'),
+        ("phi", 'φ'),
+        ("psi", 'ψ'),
+    ];
+    let (head, tail) = name.split_once('_').map_or((name, None), |(head, tail)| (head, Some(tail)));
+    let head = match GREEK.iter().find(|(word, _)| *word == head) {
+        Some((_, letter)) => letter.to_string(),
+        None => head.to_owned(),
+    };
+    tail.map_or(head.clone(), |tail| format!("{head}_{tail}"))
+}
+
+/// The formula with its symbols.
+fn with_symbols(text: &str) -> String {
+    printed(text, &mut symbol)
 }
 
 /// The formula with figures in the place of symbols; each with its unit where it stands first.

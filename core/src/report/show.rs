@@ -52,6 +52,16 @@ pub fn weight(force: Force, system: System) -> String {
     }
 }
 
+/// A weight that is carried, rounded down to a tenth: tonnes, or short tons.
+#[must_use]
+pub fn carried(force: Force, system: System) -> String {
+    let tenths = |figure: f64| libm::floor(figure * 10.0 + 1e-9) / 10.0;
+    match system {
+        System::MetreKilonewton => format!("{:.1} t", tenths(force.in_tonne())),
+        System::FootKip => format!("{:.1} tons", tenths(force.in_short_ton())),
+    }
+}
+
 /// The weight of an axle, without its unit, and the unit.
 #[must_use]
 pub fn axle(force: Force, system: System) -> (String, &'static str) {

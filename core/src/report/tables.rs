@@ -2,8 +2,8 @@
 
 use super::figure::{decimals, factor};
 use super::names;
-use super::show::{effect, line_load, line_load_unit, station, weight};
-use super::verdict::{Tone, limit, outcome, outcome_tone};
+use super::show::{carried, effect, line_load, line_load_unit, weight};
+use super::verdict::{Tone, at, limit, outcome, outcome_tone};
 use crate::check::{Class, Limit};
 use crate::rating::{Check, Rating};
 use crate::units::{System, WeightUnit};
@@ -82,7 +82,7 @@ pub fn by_vehicle(rating: &Rating, system: System) -> Table {
                     check: vehicle.ruling,
                     ..Cell::default()
                 },
-                number(vehicle.rating_weight.map_or(String::new(), |w| weight(w, system))),
+                number(vehicle.rating_weight.map_or(String::new(), |w| carried(w, system))),
             ]
         })
         .collect();
@@ -95,7 +95,7 @@ pub fn by_vehicle(rating: &Rating, system: System) -> Table {
 
 fn short_place(rating: &Rating, check: &Check, system: System) -> String {
     let line = rating.lines.get(check.key.line).map_or("?", |line| line.name.as_str());
-    format!("{line}, {}, {}", names::action(check.key.action), station(check.key.x, system))
+    format!("{line}, {}", at(check, system))
 }
 
 /// What went into a check: effects, factors, capacity.
@@ -161,12 +161,7 @@ pub fn girders(rating: &Rating, system: System) -> Table {
                         tone: outcome_tone(&check.outcome),
                         check: Some(i),
                     },
-                    words(format!(
-                        "{}, {}, {}",
-                        load_name(rating, check.key.load),
-                        names::action(check.key.action),
-                        station(check.key.x, system)
-                    )),
+                    words(format!("{}, {}", load_name(rating, check.key.load), at(check, system))),
                 ),
                 None => (words("none"), words("")),
             };

@@ -4,8 +4,9 @@ use super::figure::factor;
 use super::names;
 use super::show::{limit as limit_of, signed, station};
 use super::sign::{Face, face};
-use crate::check::{Limit, Outcome, Sign};
+use crate::check::{Action, Limit, Outcome, Sign};
 use crate::problem::{Problem, Severity};
+use crate::quantity::Length;
 use crate::rating::{Check, Rating};
 use crate::units::{System, WeightUnit};
 
@@ -82,14 +83,18 @@ pub fn check_name(rating: &Rating, check: &Check, system: System) -> String {
 /// Where a check is: `G3, Strength I, bending at 9.14 m`.
 #[must_use]
 pub fn place(rating: &Rating, check: &Check, system: System) -> String {
-    let key = &check.key;
-    let line = rating.lines.get(key.line).map_or("?", |line| line.name.as_str());
-    format!(
-        "{line}, {}, {} at {}",
-        names::state(key.state),
-        names::action(key.action),
-        station(key.x, system)
-    )
+    let line = rating.lines.get(check.key.line).map_or("?", |line| line.name.as_str());
+    format!("{line}, {}, {}", names::state(check.key.state), at(check, system))
+}
+
+/// What is asked for and where: `bending at 9.14 m`, `web over the near bearing`.
+#[must_use]
+pub fn at(check: &Check, system: System) -> String {
+    match check.key.action {
+        Action::Bearing if check.key.x > Length::ZERO => "web over the far bearing".to_owned(),
+        Action::Bearing => "web over the near bearing".to_owned(),
+        action => format!("{} at {}", names::action(action), station(check.key.x, system)),
+    }
 }
 
 /// An outcome as a figure or in a few words.
@@ -206,8 +211,10 @@ fn reasons(rating: &Rating, governing: Option<&Check>, system: System) -> Vec<St
     if !barred.is_empty() && rating.posting.sign != Sign::Close {
         reasons.push(format!("Not allowed at any weight: {}.", barred.join(", ")));
     }
-    let next = rating.next.iter().filter_map(|i| rating.checks.get(*i));
-    if let Some(next) = next.into_iter().find(|next| Some(*next) != governing) {
+    // The same place under the next vehicle says nothing new.
+    let kind = |check: &Check| (check.key.line, check.key.action, check.key.state);
+    let mut next = rating.next.iter().filter_map(|i| rating.checks.get(*i));
+    if let Some(next) = next.find(|next| governing.is_none_or(|governing| kind(governing) != kind(next))) {
         reasons.push(format!(
             "Next behind it: {}, {}.",
             check_name(rating, next, system),

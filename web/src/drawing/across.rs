@@ -34,8 +34,14 @@ impl Scale {
 
 /// The drawing.
 pub fn node(s: &Scene, sketch: &Sketch) -> Node {
-    let per_m = ((f64::from(WIDE) - 2.0 * MARGIN) / sketch.width.m.max(1.0)).min(MOST);
-    let scale = Scale { left: (f64::from(WIDE) - per_m * sketch.width.m) / 2.0, per_m };
+    // Entries that do not fit together are drawn as they are, so that one sees which.
+    let last = sketch
+        .girders
+        .last()
+        .map_or(0.0, |girder| girder.y + girder.plates.top.0.max(girder.plates.bottom.0));
+    let wide = sketch.width.m.max(sketch.curb + sketch.roadway.m).max(last).max(1.0);
+    let per_m = ((f64::from(WIDE) - 2.0 * MARGIN) / wide).min(MOST);
+    let scale = Scale { left: (f64::from(WIDE) - per_m * wide) / 2.0, per_m };
     let mut canvas = Canvas::new("Across", "looking ahead, to scale");
     let soffit = deck(s, &mut canvas, sketch, &scale);
     let governs = s.rating.and_then(|r| r.checks.get(r.governing?)).map(|check| check.key.line);

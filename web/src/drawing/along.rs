@@ -41,11 +41,7 @@ pub fn node(s: &Scene, sketch: &Sketch) -> Node {
     let depth = girder.map_or(0.8, |girder| girder.plates.depth);
     let bottom = TOP + whole(depth * scale).clamp(12, 60);
     let known = sketch.span.known && girder.is_none_or(|girder| girder.plates.known);
-    let class = match (known, governing.is_some()) {
-        (_, true) => "steel-governs",
-        (true, false) => "steel",
-        (false, false) => "steel-assumed",
-    };
+    let class = if known { "steel" } else { "steel-assumed" };
     let section = girder.map_or("", |girder| girder.section.as_str());
     canvas.part(class, rect(LEFT, TOP, RIGHT, bottom), section, &format!("girder {name}"));
     canvas.shape("support", format!("M{LEFT} {bottom}l-9 14h18Z"));

@@ -44,7 +44,9 @@ pub fn node(s: &Scene, rating: &Rating) -> Option<Node> {
     let bottom = ZERO + whole(TALL);
     canvas.shape("limit", format!("M{here} {}V{bottom}", ZERO - 8));
     // The words stand on the side with more room.
-    let (anchor, beside) = if here > (LEFT + RIGHT) / 2 { ("end", here - 8) } else { ("start", here + 8) };
+    let off = if curve.action == Action::Bearing { 30 } else { 8 };
+    let (anchor, beside) =
+        if here > (LEFT + RIGHT) / 2 { ("end", here - off) } else { ("start", here + off) };
     canvas.label((beside, ZERO + 22), "strong", anchor, format!("asked {}", show(at.demand)));
     canvas.label((beside, ZERO + 38), "strong", anchor, format!("carries {}", show(at.capacity)));
     canvas.label((beside, bottom + 18), "small", anchor, format!("governs at {}", station(at.x, s.system())));

@@ -9,7 +9,7 @@ use crate::scene::Scene;
 pub(super) fn regions(s: &Scene) -> Vec<Node> {
     let mut regions = vec![opening(s, Page::Posting, "")];
     match s.rating {
-        None => regions.push(crate::missing::region(s, "posting.missing")),
+        None => regions[0].c.push(crate::missing::link()),
         Some(rating) => {
             let said = verdict(rating, s.system());
             regions[0].c.push(text(said.headline).with("tone", said.tone.name()));

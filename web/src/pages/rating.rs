@@ -1,6 +1,7 @@
 //! Rating factors, what went into the governing one, and the factors that the user sets.
 
 use girderbook_core::basis::mbe_a::{NAMES, factor_label};
+use girderbook_core::problem::{Problem, Severity};
 use girderbook_core::report::tables;
 use girderbook_core::report::verdict::check_name;
 
@@ -41,7 +42,9 @@ pub(super) fn regions(s: &Scene) -> Vec<Node> {
                 );
             }
             regions.extend(told(s, "rating.none", "No number", &rating.not_rated));
-            regions.extend(told(s, "rating.notes", "Worth knowing", &rating.notes));
+            let warnings = s.opened.problems.iter().filter(|problem| problem.severity == Severity::Warning);
+            let notes: Vec<Problem> = rating.notes.iter().chain(warnings).cloned().collect();
+            regions.extend(told(s, "rating.notes", "Worth knowing", &notes));
         }
     }
     regions.push(overrides(s));
@@ -49,7 +52,7 @@ pub(super) fn regions(s: &Scene) -> Vec<Node> {
 }
 
 /// Problems of the rating as a list, each leading to its field.
-fn told(s: &Scene, id: &str, title: &str, problems: &[girderbook_core::problem::Problem]) -> Option<Node> {
+fn told(s: &Scene, id: &str, title: &str, problems: &[Problem]) -> Option<Node> {
     if problems.is_empty() {
         return None;
     }

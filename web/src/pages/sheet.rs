@@ -12,14 +12,14 @@ use crate::scene::{Scene, option};
 pub(super) fn regions(s: &Scene) -> Vec<Node> {
     let mut regions = vec![opening(s, Page::Sheet, "")];
     let Some(rating) = s.rating else {
-        regions.push(crate::missing::region(s, "sheet.missing"));
+        regions[0].c.push(crate::missing::link());
         return regions;
     };
     let Some(check) = s.shown.and_then(|i| rating.checks.get(i)) else {
         return regions;
     };
     regions.push(chosen(s, rating, check));
-    regions.push(Node::region("sheet.lines", "Worksheet").all(s.sheet.iter().map(line)));
+    regions.push(Node::region("sheet.lines", "Worksheet").all(s.sheet.iter().map(|row| line(s, row))));
     regions
 }
 
@@ -73,7 +73,7 @@ fn chosen(s: &Scene, rating: &Rating, check: &Check) -> Node {
         )
 }
 
-fn line(row: &SheetRow) -> Node {
+fn line(s: &Scene, row: &SheetRow) -> Node {
     let id = format!("line{}", row.no);
     match row.from {
         From::Title => Node::new("title").named(id).with("text", row.what.clone()),
@@ -92,7 +92,7 @@ fn line(row: &SheetRow) -> Node {
                 .with("cite", row.cite.clone())
                 .with("from", from.name())
                 .with("refs", refs.join(","))
-                .with("go", row.path.clone())
+                .with("go", s.go(&row.path))
         }
     }
 }

@@ -65,6 +65,9 @@ export function field(node, hands) {
       // What is being written is never written over.
       if (document.activeElement !== input) input.value = value;
     },
+    ghost: (value) => {
+      input.placeholder = value;
+    },
     mode: (value) => {
       input.dataset.mode = value;
       input.inputMode = value === 'number' ? 'decimal' : 'text';

@@ -10,7 +10,6 @@ import { keepOffline } from './trust.js';
 
 /** @type {import('./border.js').OpenBook | null} */
 let book = null;
-let bookId = '';
 let page = 'site';
 /** Text of the book as it was last taken over, for a fresh instance after a panic. */
 let last = '';
@@ -168,7 +167,6 @@ async function openBook(id, text, fresh) {
   }
   const mine = await keeper.begin(id);
   book = opened.book;
-  bookId = id;
   last = text;
   history.replaceState(null, '', `#${id}`);
   part('shelf').hidden = true;
@@ -187,7 +185,6 @@ async function toShelf() {
   await keeper.end();
   book?.free();
   book = null;
-  bookId = '';
   history.replaceState(null, '', '#');
   part('book').hidden = true;
   part('shelf').hidden = false;

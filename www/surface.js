@@ -35,8 +35,8 @@ import { table } from './nodes/table.js';
 /** @type {{[kind: string]: (node: TreeNode, hands: Hands) => Mounted}} */
 const KINDS = { region, heading, text, group, field, choice, button, link, list, table, drawing, line, title: sheetTitle, figure };
 
-/** @param {TreeNode} node @returns {Mounted} */
-function region(node) {
+/** @returns {Mounted} */
+function region() {
   const element = make('section', { class: 'region' });
   const set = (/** @type {string} */ name, /** @type {string} */ value) => {
     if (name === 'label') attribute(element, 'aria-label', value);

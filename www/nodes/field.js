@@ -8,8 +8,8 @@ import { attribute, make, words } from '../dom.js';
 const ORIGINS = ['measured', 'drawing', 'assumed'];
 let count = 0;
 
-/** @param {TreeNode} node @param {Hands} hands @returns {Mounted} */
-export function field(node, hands) {
+/** @param {TreeNode} _node @param {Hands} hands @returns {Mounted} */
+export function field(_node, hands) {
   count += 1;
   const id = `field-${count}`;
   let path = '';

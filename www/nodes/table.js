@@ -5,8 +5,8 @@ import { attribute, make, words } from '../dom.js';
 /** @typedef {import('../surface.js').Mounted} Mounted */
 /** @typedef {import('../border.js').TreeNode} TreeNode */
 
-/** @param {TreeNode} node @param {Hands} hands @returns {Mounted} */
-export function table(node, hands) {
+/** @param {TreeNode} _node @param {Hands} hands @returns {Mounted} */
+export function table(_node, hands) {
   const caption = make('caption', { hidden: '' });
   const inside = make('table', { class: 'table' }, caption);
   const element = make('div', { class: 'scroller', tabindex: '0', role: 'group' }, inside);

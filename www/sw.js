@@ -5,7 +5,9 @@ const VERSION = "";
 const POLICY = "";
 
 const worker = /** @type {ServiceWorkerGlobalScope} */ (/** @type {unknown} */ (self));
-const CACHE = `girderbook ${VERSION}`;
+// The cache carries the folder's name: another copy on the same server has its own.
+const PREFIX = `girderbook ${worker.registration.scope} `;
+const CACHE = PREFIX + VERSION;
 
 /** @param {Response} response */
 async function withPolicy(response) {
@@ -17,16 +19,21 @@ async function withPolicy(response) {
 /** Whole or not at all: one file that is missing or changed, and the old version stays. */
 async function keep() {
   const cache = await caches.open(CACHE);
-  for (const { path, integrity } of FILES) {
-    const response = await fetch(new Request(path, { cache: 'reload', integrity }));
-    if (!response.ok) throw new Error(`${path}: ${response.status}`);
-    await cache.put(path, await withPolicy(response));
+  try {
+    for (const { path, integrity } of FILES) {
+      const response = await fetch(new Request(path, { cache: 'reload', integrity }));
+      if (!response.ok) throw new Error(`${path}: ${response.status}`);
+      await cache.put(path, await withPolicy(response));
+    }
+  } catch (error) {
+    await caches.delete(CACHE);
+    throw error;
   }
 }
 
 async function sweep() {
   for (const name of await caches.keys()) {
-    if (name !== CACHE) await caches.delete(name);
+    if (name.startsWith(PREFIX) && name !== CACHE) await caches.delete(name);
   }
   await worker.clients.claim();
 }
@@ -41,6 +48,10 @@ async function answer(request) {
 
 worker.addEventListener('install', (event) => event.waitUntil(keep()));
 worker.addEventListener('activate', (event) => event.waitUntil(sweep()));
+worker.addEventListener('message', (event) => {
+  // A new version waits until the user takes it.
+  if (event.data === 'take') worker.skipWaiting();
+});
 worker.addEventListener('fetch', (event) => {
   if (event.request.method === 'GET') event.respondWith(answer(event.request));
 });

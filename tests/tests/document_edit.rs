@@ -4,6 +4,7 @@
 use girderbook_core::document::book::UnitSystem;
 use girderbook_core::document::{self, Book, Edit, MOST_CHARACTERS, Origin};
 use girderbook_core::problem::Problem;
+use girderbook_core::quantity::{Length, Stress};
 use proptest::prelude::*;
 
 fn five_girders() -> Book {
@@ -41,9 +42,9 @@ fn what_is_typed_is_kept_as_it_is() {
 #[test]
 fn readings_are_one_text_each() {
     let mut book = five_girders();
-    done(book.set("layers.l1.thickness", "65; 72 mm ; 2 3/4 in"));
-    assert_eq!(book.layers[0].thickness.read, ["65", "72 mm", "2 3/4 in"]);
-    assert_eq!(text(&book, "layers.l1.thickness"), "65; 72 mm; 2 3/4 in");
+    done(book.set("layers.l1.thickness", "65 mm; 72 mm ; 2 3/4 in"));
+    assert_eq!(book.layers[0].thickness.read, ["65 mm", "72 mm", "2 3/4 in"]);
+    assert_eq!(text(&book, "layers.l1.thickness"), "65 mm; 72 mm; 2 3/4 in");
     done(book.set("layers.l1.thickness", "  "));
     assert!(book.layers[0].thickness.read.is_empty());
 }
@@ -116,13 +117,37 @@ fn paths_that_lead_nowhere_are_refused() {
     assert_eq!(book, before);
 }
 
-/// 65 in a metric book stays 65 mm when the book turns to feet and inches.
+/// Readings side by side are taken apart where that changes nothing.
+#[test]
+fn readings_side_by_side_are_one_text_each() {
+    let mut book = five_girders();
+    for (typed, kept) in [
+        ("65 72 70", vec!["65", "72", "70"]),
+        ("65, 72, 70", vec!["65", "72", "70"]),
+        ("65mm 72mm; 2 3/4 in", vec!["65mm", "72mm", "2 3/4 in"]),
+        ("65 72 70 mm", vec!["65 72 70 mm"]),
+        ("2 3/4 in", vec!["2 3/4 in"]),
+        ("6x5 3", vec!["6x5 3"]),
+    ] {
+        done(book.set("layers.l1.thickness", typed));
+        assert_eq!(book.layers[0].thickness.read, kept, "{typed}");
+    }
+    // In inches 2 3/4 is one reading, and stays one.
+    done(book.set("system", "ft-kip"));
+    done(book.set("layers.l1.thickness", "2 3/4"));
+    assert_eq!(book.layers[0].thickness.read, ["2 3/4"]);
+}
+
+/// 65 in a metric book stays 65 mm when the book turns to feet and inches, and back.
 #[test]
 fn changing_the_unit_system_changes_no_size() {
     let mut book = five_girders();
     for (path, typed) in [
-        ("layers.l1.thickness", "65; 2 3/4 in"),
+        ("layers.l1.thickness", "65; 72 mm"),
+        ("deck.haunch", "65 72 70 mm"),
+        ("deck.width", "9.42 m"),
         ("spans.s1.length", "18.3"),
+        ("deck.concrete_weight", "150 pcf"),
         ("traffic.adtt", "420"),
         ("deck.slab", "6x5 abc"),
         ("skew", "15"),
@@ -131,10 +156,34 @@ fn changing_the_unit_system_changes_no_size() {
     }
     let before = book.clone();
     let back = done(book.set("system", "ft-kip"));
-    assert_eq!(text(&book, "layers.l1.thickness"), "65 mm; 2 3/4 in");
-    assert_eq!(text(&book, "spans.s1.length"), "18.3 m");
-    assert_eq!(text(&book, "traffic.adtt"), "420");
-    assert_eq!(text(&book, "deck.slab"), "6x5 abc");
+    for (path, kept) in [
+        ("layers.l1.thickness", "65 mm; 72 mm"),
+        ("deck.haunch", "65 mm; 72 mm; 70 mm"),
+        ("deck.width", "9.42 m"),
+        ("spans.s1.length", "18.3 m"),
+        ("deck.concrete_weight", "150 pcf"),
+        ("traffic.adtt", "420"),
+        ("deck.slab", "6x5 abc"),
+        ("skew", "15"),
+    ] {
+        assert_eq!(text(&book, path), kept, "{path}");
+    }
+    for (path, typed) in [("deck.roadway", "24-0 1/2"), ("deck.slab", "7 1/4; 7"), ("deck.width", "27'-6\"")]
+    {
+        done(book.set(path, typed));
+    }
+    done(book.set("system", "m-kN"));
+    for (path, kept, ft) in [
+        ("deck.slab", "7 1/4 in; 7 in", 7.125 / 12.0),
+        ("deck.width", "27'-6\"", 27.5),
+        ("deck.roadway", "", 24.0 + 0.5 / 12.0),
+    ] {
+        let is = document::value::<Length>(&book, path).expect(path).expect(path);
+        assert!((is.value.in_ft() / ft - 1.0).abs() < 1e-15, "{path}: {}", text(&book, path));
+        assert!(kept.is_empty() || text(&book, path) == kept, "{path}: {}", text(&book, path));
+    }
+    book = before.clone();
+    done(book.set("system", "ft-kip"));
     let after = book.clone();
     let again = done(book.apply(back));
     assert_eq!(book, before);
@@ -322,11 +371,11 @@ fn moves() -> impl Strategy<Value = Move> {
 }
 
 struct Nothing;
-impl document::Defaults for Nothing {
-    fn yield_strength(&self, _: Option<i32>) -> Option<(girderbook_core::quantity::Stress, &'static str)> {
+impl girderbook_core::material::Defaults for Nothing {
+    fn yield_strength(&self, _: Option<i32>) -> Option<(Stress, &'static str)> {
         None
     }
-    fn concrete_strength(&self, _: Option<i32>) -> Option<(girderbook_core::quantity::Stress, &'static str)> {
+    fn concrete_strength(&self, _: Option<i32>) -> Option<(Stress, &'static str)> {
         None
     }
 }

@@ -2,7 +2,8 @@
 
 use girderbook_core::bridge::{ConditionRating, MemberKind, Stage, StripSide};
 use girderbook_core::document::book::UnitSystem;
-use girderbook_core::document::{self, Book, Defaults, Opened};
+use girderbook_core::document::{self, Book, Opened};
+use girderbook_core::material::Defaults;
 use girderbook_core::problem::{Problem, Severity};
 use girderbook_core::quantity::{Length, Stress};
 use girderbook_core::units::Provenance;

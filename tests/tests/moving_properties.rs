@@ -1,12 +1,13 @@
 //! What must hold of the search whatever the bridge and the vehicle: properties, planted answers and
 //! exact ties.
 
-use girderbook_core::influence::{InfluenceLine, Side, simple_span};
+use girderbook_core::influence::{InfluenceLine, LineKind, Side, simple_span};
 use girderbook_core::load::{AxleTrain, Spacing};
 use girderbook_core::moving::{
     AxlePolicy, Direction, Position, Workspace, absolute_maximum, effect_at, envelope, extremes,
     lane_extremes,
 };
+use girderbook_core::numerics::{Cubic, Piecewise};
 use girderbook_core::quantity::{Force, Length, LineLoad, Quantity};
 use girderbook_tests::moving_reference as reference;
 use girderbook_tests::two_span::TwoSpans;
@@ -76,8 +77,10 @@ fn any_line() -> impl Strategy<Value = InfluenceLine> {
     prop_oneof![simple_line(), curved_line()]
 }
 
+/// What differences are measured against: the weight at the peak of the line, which within a thousandth
+/// of the beam from a support counts as that of a section there.
 fn peak(line: &InfluenceLine, train: &AxleTrain) -> f64 {
-    line.ordinates().peak() * train.weight().base()
+    line.ordinates().scale() * train.weight().base()
 }
 
 fn values(line: &InfluenceLine, train: &AxleTrain, policy: AxlePolicy) -> (f64, f64) {
@@ -396,6 +399,45 @@ fn planted_answers() {
     let none = simple_span::moment(span, Length::ZERO).expect("inside");
     assert_eq!(m(&none, &half).value, 0.0);
     assert!(m(&none, &half).position.is_none());
+}
+
+/// The weight on the bridge jumps at both ends: with a spacing equal to the span, both axles count when
+/// each stands on a support, also where the places do not add up to the last digit.
+#[test]
+fn axles_on_both_supports_count_in_full() {
+    for m in [10.0, 0.1 + 0.2, 17.3, 22.0 / 7.0] {
+        let span = Length::from_m(m);
+        let ones = Piecewise::new(vec![0.0, span.base()], vec![Cubic::constant(1.0)]).expect("well formed");
+        let weight = InfluenceLine::new(LineKind::Reaction { support: 0 }, ones);
+        let part = span / 3.0;
+        let three = |s: &[Spacing]| made("three", vec![Force::from_kn(10.0); 3], s.to_vec());
+        let exact = three(&[Spacing::Fixed(part), Spacing::Fixed(span - part)]);
+        let free =
+            three(&[Spacing::Range { from: part, to: span }, Spacing::Range { from: span - part, to: span }]);
+        let long = three(&[Spacing::Fixed(part), Spacing::Fixed(span - 0.99 * part)]);
+        for (train, want) in [(exact, 30.0), (free, 30.0), (long, 20.0)] {
+            let found = extremes(&weight, &train, AxlePolicy::AllCount).expect("finite");
+            assert!((found.max.force().in_kn() - want).abs() < 1e-9, "{m} m: {}", found.max.force().in_kn());
+            assert_eq!(found.max.axles_on.len(), want as usize / 10);
+        }
+    }
+}
+
+/// What is below 1e-11 of the peak is round-off: 0, and no position is given for it.
+#[test]
+fn next_to_nothing_is_nothing() {
+    let pieces = [Cubic::constant(-1.0), Cubic::constant(1e-12), Cubic::constant(1e-10)];
+    for (last, some) in [(2, false), (3, true)] {
+        let knots = (0..=last).map(|i| f64::from(i) * 1e4).collect();
+        let f = Piecewise::new(knots, pieces[..last as usize].to_vec()).expect("well formed");
+        let line = InfluenceLine::new(LineKind::Reaction { support: 0 }, f);
+        let train = made("one", vec![Force::from_kn(100.0)], vec![]);
+        for policy in POLICIES {
+            let found = extremes(&line, &train, policy).expect("finite").max;
+            assert_eq!(found.position.is_some(), some);
+            assert_eq!(found.value > 0.0, some);
+        }
+    }
 }
 
 /// At a shear's cut a relieving axle that can be moved off by a variable spacing is moved off.

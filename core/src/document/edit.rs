@@ -73,7 +73,8 @@ impl Book {
                 let read = match fields::form(path) {
                     Some(Form::Shape) if text.trim().is_empty() => Vec::new(),
                     Some(Form::Shape) => vec![text.trim().to_string()],
-                    _ => readings::split(text),
+                    Some(Form::Quantity(measure)) => readings::split(text, Some(measure), self.system),
+                    _ => readings::split(text, None, self.system),
                 };
                 if read.len() > MOST_ITEMS {
                     return Err(too_much(path));
@@ -93,8 +94,9 @@ impl Book {
                 }
             }
         };
-        let mut steps = match path {
-            "system" if self.system.text() != text => self.units_written_out(self.system),
+        let becomes = UnitSystem::ALL.iter().copied().find(|system| system.text() == text);
+        let mut steps = match becomes {
+            Some(becomes) if path == "system" && becomes != self.system => self.units_written_out(becomes),
             _ => Vec::new(),
         };
         steps.push(Step::Leaf(path.to_string(), value));
@@ -190,12 +192,12 @@ impl Book {
         }
     }
 
-    /// Steps that write the unit of `system` behind every bare figure.
-    fn units_written_out(&self, system: UnitSystem) -> Vec<Step> {
+    /// Steps that write the unit behind every bare figure, before the system becomes another.
+    fn units_written_out(&self, becomes: UnitSystem) -> Vec<Step> {
         let mut steps = Vec::new();
         self.visit("", &mut |path, leaf| {
             if let (Leaf::Entry(entry), Some(Form::Quantity(measure))) = (leaf, fields::form(path)) {
-                let written = readings::with_units(&entry.read, measure.unit(system));
+                let written = readings::written_out(&entry.read, measure, self.system, becomes);
                 if written != entry.read {
                     let entry = Entry { read: written, from: entry.from };
                     steps.push(Step::Leaf(path.to_string(), Value::Entry(entry)));

@@ -275,13 +275,13 @@ mod tests {
             let at = FIELDS.iter().position(|(pattern, ..)| is_of(path, pattern, false));
             let at = at.unwrap_or_else(|| panic!("{path} is not in the table"));
             met[at] = true;
-            let fits = match (leaf, FIELDS[at].2) {
+            let fits = matches!(
+                (leaf, FIELDS[at].2),
                 (Leaf::Entry(_), Form::Quantity(_) | Form::Shape)
-                | (Leaf::Words(_), Form::Words)
-                | (Leaf::Choice(..), Form::Choice)
-                | (Leaf::Reference(_), Form::Reference(_)) => true,
-                _ => false,
-            };
+                    | (Leaf::Words(_), Form::Words)
+                    | (Leaf::Choice(..), Form::Choice)
+                    | (Leaf::Reference(_), Form::Reference(_))
+            );
             assert!(fits, "{path}");
         });
         let unmet: Vec<_> = FIELDS.iter().zip(met).filter(|(_, met)| !met).collect();

@@ -2,10 +2,10 @@
 //!
 //! - [`book`]: the saved form, format 1;
 //! - [`entry`]: its leaves, readings as they were written;
-//! - [`read`] and [`write`]: the file, checked before anything is built on it;
-//! - [`fields`]: every field in one table, by path;
+//! - [`read()`] and [`write()`]: the file, checked before anything is built on it;
+//! - [`mod@fields`]: every field in one table, by path;
 //! - [`Book::set`], [`Book::provenance`], [`Book::act`]: edits by path, each with what takes it back;
-//! - [`bridge`]: from the text to the bridge, with every problem and every default in force.
+//! - [`bridge()`]: from the text to the bridge, with every problem and every default in force.
 //!
 //! These are the only serialised types. Nothing that was typed is lost: what cannot be understood
 //! is kept as it is, and no rating is built on it.

@@ -7,17 +7,22 @@ use super::spread::Spread;
 use super::{AxlePolicy, Direction, Extremes, Governing, Peak, Peaks, Sense};
 use crate::influence::InfluenceLine;
 use crate::load::AxleTrain;
-use crate::numerics::Piecewise;
+use crate::numerics::{Cubic, Piecewise};
 use crate::problem::{Problem, finite};
 use crate::quantity::{Length, Quantity};
 
-/// Values below this part of the weight of the train times the peak of the line are 0.
+/// Values below this part of the weight of the train times the scale of the line are 0.
 const NOTHING: f64 = 1e-11;
 /// What may be left after the last axle has gone, and by how much a value may differ when it is summed
 /// anew at the position found, as parts of the same.
 const RESIDUE: f64 = 1e-10;
 /// The second direction takes over only when it is larger by more than round-off.
 const SAME: f64 = 1e-13;
+
+/// The two extremes as indices, and the sign that makes either of them a largest value.
+const MAX: usize = 0;
+const MIN: usize = 1;
+const SIGN: [f64; 2] = [1.0, -1.0];
 
 const DIRECTIONS: [Direction; 2] = [Direction::Forward, Direction::Backward];
 
@@ -26,6 +31,7 @@ const DIRECTIONS: [Direction; 2] = [Direction::Forward, Direction::Backward];
 #[derive(Clone, Debug, Default)]
 pub struct Workspace {
     layouts: [Layout; 2],
+    closed: [Layout; 2],
     heads: Heads,
     spread: Spread,
     part: Piecewise,
@@ -100,7 +106,7 @@ fn governing(
         Sense::Max => both.most,
         Sense::Min => both.least,
     };
-    if (again - peak.value).abs() > RESIDUE * line.ordinates().peak() * train.weight().base() {
+    if (again - peak.value).abs() > RESIDUE * line.ordinates().scale() * train.weight().base() {
         return Err(failed());
     }
     let axles_on = placed_axles(line, train, &position, policy, sense)?;
@@ -117,8 +123,10 @@ fn failed() -> Problem {
 
 impl Workspace {
     fn take(&mut self, train: &AxleTrain) {
-        self.layouts[0].set(train, false);
-        self.layouts[1].set(train, true);
+        for (reversed, (layout, closed)) in self.layouts.iter_mut().zip(&mut self.closed).enumerate() {
+            layout.set(train, reversed == 1, false);
+            closed.set(train, reversed == 1, true);
+        }
     }
 
     /// Both extremes on one line; the spacings chosen for them go to `keep` if asked for.
@@ -130,38 +138,84 @@ impl Workspace {
         keep: &mut Option<Keep>,
     ) -> Result<Peaks, Problem> {
         let f = line.ordinates();
-        let scale = finite(f.peak() * train.weight().base(), "vehicle", "the effect of the vehicle")?;
+        let scale = finite(f.scale() * train.weight().base(), "vehicle", "the effect of the vehicle")?;
         let mut peaks = Peaks { max: Peak::EMPTY, min: Peak::EMPTY };
         let (from, to) = line.extent();
         let case = Case { touch: touch(line, train), scale, reach: (to - from).base() };
         // Where the line has no ordinate of a sign, that extreme is the empty bridge.
-        let worth = |ordinate: f64| ordinate > NOTHING * f.peak();
+        let worth = |ordinate: f64| ordinate > NOTHING * f.scale();
         let wanted = [worth(f.largest()), worth(-f.least())];
-        match policy {
-            _ if scale == 0.0 => {}
-            AxlePolicy::AllCount => self.seek(f, &case, wanted, &mut peaks, keep)?,
-            AxlePolicy::NeglectRelieving => {
-                for (sense, sign) in [1.0, -1.0].into_iter().enumerate() {
-                    if !wanted[sense] {
-                        continue;
-                    }
-                    let only = [sense == 0, sense == 1];
-                    if wanted[1 - sense] {
-                        let mut part = core::mem::take(&mut self.part);
-                        f.part_into(sign, &mut part);
-                        let done = self.seek(&part, &case, only, &mut peaks, keep);
-                        self.part = part;
-                        done?;
-                    } else {
-                        self.seek(f, &case, only, &mut peaks, keep)?;
-                    }
-                }
+        if scale == 0.0 {
+            return Ok(peaks);
+        }
+        if policy == AxlePolicy::AllCount && self.layouts[0].groups.len() == 1 {
+            self.fixed(f, &case, wanted, &mut peaks, keep)?;
+            return Ok(peaks);
+        }
+        for sense in [MAX, MIN] {
+            if !wanted[sense] {
+                continue;
             }
+            // The part of the line that has the sign sought: all of it where it has no other.
+            if !wanted[1 - sense] {
+                self.seek(f, f, &case, sense, &mut peaks, keep)?;
+                continue;
+            }
+            let mut part = core::mem::take(&mut self.part);
+            f.part_into(SIGN[sense], &mut part);
+            let line = match policy {
+                AxlePolicy::AllCount => f,
+                AxlePolicy::NeglectRelieving => &part,
+            };
+            let done = self.seek(line, &part, &case, sense, &mut peaks, keep);
+            self.part = part;
+            done?;
         }
         Ok(peaks)
     }
 
+    /// One extreme, `part` being the part of the line that has its sign.
+    ///
+    /// Where the line is a single hump, no spacing beyond its least can help: closing a gap on the hump's
+    /// top moves no axle away from it. Elsewhere the part, if it is a single hump, gives a bound that
+    /// closed-up trains often reach. What is left takes the search over all spacings.
     fn seek(
+        &mut self,
+        f: &Piecewise,
+        part: &Piecewise,
+        case: &Case,
+        sense: usize,
+        peaks: &mut Peaks,
+        keep: &mut Option<Keep>,
+    ) -> Result<(), Problem> {
+        let only = [sense == MAX, sense == MIN];
+        let sign = SIGN[sense];
+        self.fixed(f, case, only, peaks, keep)?;
+        if self.layouts[0].groups.len() == 1 || f.is_single_hump(sign) {
+            return Ok(());
+        }
+        if part.is_single_hump(sign) {
+            let mut bound = Peaks { max: Peak::EMPTY, min: Peak::EMPTY };
+            self.fixed(part, case, only, &mut bound, &mut None)?;
+            if !case.takes_over(peaks, sense, bound.get(sense).value)? {
+                return Ok(());
+            }
+        }
+        for (layout, direction) in self.layouts.iter().zip(DIRECTIONS) {
+            let value = sign * self.spread.largest(f, sign, layout, case.touch, &mut self.heads);
+            if case.takes_over(peaks, sense, value)? {
+                let leads = &self.spread.leads;
+                peaks.set(sense, value, direction, first_axle(layout, leads, direction));
+                if let Some(keep) = keep {
+                    keep.spacings[sense] = chosen(keep.train, layout, leads, direction);
+                }
+            }
+        }
+        Ok(())
+    }
+
+    /// The extremes with every spacing at its least, in both directions.
+    fn fixed(
         &mut self,
         f: &Piecewise,
         case: &Case,
@@ -169,35 +223,14 @@ impl Workspace {
         peaks: &mut Peaks,
         keep: &mut Option<Keep>,
     ) -> Result<(), Problem> {
-        for (layout, direction) in self.layouts.iter().zip(DIRECTIONS) {
-            if layout.groups.len() == 1 {
-                let swept = sweep(f, &layout.loads, &layout.offsets, case.touch, &mut self.heads);
-                case.check(&swept.rest)?;
-                // The first axle leads forward; backward the last one does.
-                let behind = match direction {
-                    Direction::Forward => 0.0,
-                    Direction::Backward => layout.offsets.last().copied().unwrap_or(0.0),
-                };
-                for (sense, (value, lead)) in [swept.most, swept.least].into_iter().enumerate() {
-                    if wanted[sense] && case.takes_over(peaks, sense, value)? {
-                        peaks.set(sense, value, direction, lead - behind);
-                        if let Some(keep) = keep {
-                            keep.spacings[sense] = chosen(keep.train, layout, &[lead], direction);
-                        }
-                    }
-                }
-            } else {
-                for (sense, sign) in [1.0, -1.0].into_iter().enumerate() {
-                    if !wanted[sense] {
-                        continue;
-                    }
-                    let value = sign * self.spread.largest(f, sign, layout, case.touch, &mut self.heads);
-                    if case.takes_over(peaks, sense, value)? {
-                        let leads = &self.spread.leads;
-                        peaks.set(sense, value, direction, first_axle(layout, leads, direction));
-                        if let Some(keep) = keep {
-                            keep.spacings[sense] = chosen(keep.train, layout, leads, direction);
-                        }
+        for (layout, direction) in self.closed.iter().zip(DIRECTIONS) {
+            let swept = sweep(f, &layout.loads, &layout.offsets, case.touch, &mut self.heads);
+            case.check(&swept.rest)?;
+            for (sense, (value, lead)) in [swept.most, swept.least].into_iter().enumerate() {
+                if wanted[sense] && case.takes_over(peaks, sense, value)? {
+                    peaks.set(sense, value, direction, first_axle(layout, &[lead], direction));
+                    if let Some(keep) = keep {
+                        keep.spacings[sense] = keep.train.spacings().iter().map(|s| s.least()).collect();
                     }
                 }
             }
@@ -208,7 +241,7 @@ impl Workspace {
 
 impl Case {
     /// Nothing may be left after the last axle has gone.
-    fn check(&self, rest: &crate::numerics::Cubic) -> Result<(), Problem> {
+    fn check(&self, rest: &Cubic) -> Result<(), Problem> {
         let left = rest.0.iter().rev().fold(0.0, |sum, c| sum * self.reach + c.abs());
         if left <= RESIDUE * self.scale { Ok(()) } else { Err(failed()) }
     }
@@ -216,10 +249,7 @@ impl Case {
     /// Whether a value is worth more than what was found before.
     fn takes_over(&self, peaks: &Peaks, sense: usize, value: f64) -> Result<bool, Problem> {
         finite(value, "vehicle", "the effect of the vehicle")?;
-        let (before, size) = match sense {
-            0 => (peaks.max.value, value),
-            _ => (-peaks.min.value, -value),
-        };
+        let (before, size) = (SIGN[sense] * peaks.get(sense).value, SIGN[sense] * value);
         Ok(size > NOTHING * self.scale && size > before + SAME * self.scale)
     }
 }
@@ -227,10 +257,11 @@ impl Case {
 impl Peaks {
     fn set(&mut self, sense: usize, value: f64, direction: Direction, first_axle: f64) {
         let peak = Peak { value, at: Some((direction, Length::from_base(first_axle))) };
-        match sense {
-            0 => self.max = peak,
-            _ => self.min = peak,
-        }
+        if sense == MAX { self.max = peak } else { self.min = peak }
+    }
+
+    fn get(&self, sense: usize) -> &Peak {
+        if sense == MAX { &self.max } else { &self.min }
     }
 }
 

@@ -2,34 +2,58 @@
 
 use crate::numerics::{Cubic, Piecewise};
 
-/// The next sum of each row in [`merge`], with its column.
-pub(super) type Heads = Vec<(f64, usize)>;
+/// Memory of [`Events`], used again.
+#[derive(Clone, Debug, Default)]
+pub(super) struct Heads {
+    sums: Vec<f64>,
+    columns: Vec<usize>,
+}
 
-/// Calls `visit(sum, row, column)` for every sum of a row and a column in ascending order. Rows and
-/// columns ascend; an event is known by its indices, never by taking the sum apart again.
-fn merge(rows: &[f64], columns: &[f64], heads: &mut Heads, mut visit: impl FnMut(f64, usize, usize)) {
-    heads.clear();
-    heads.extend(rows.iter().map(|row| (row + columns[0], 0)));
-    for _ in 0..rows.len() * columns.len() {
-        let mut row = 0;
-        for r in 1..heads.len() {
-            if heads[r].0 < heads[row].0 {
-                row = r;
-            }
-        }
-        let (sum, column) = heads[row];
-        visit(sum, row, column);
-        let next = column + 1;
-        heads[row] = (columns.get(next).map_or(f64::INFINITY, |c| rows[row] + c), next);
+/// All events of axles at offsets behind a lead on a line with knots, in order of the place of the lead,
+/// as (place, knot, axle).
+///
+/// Knots and offsets ascend, so that the sums of one knot and all offsets do: rows that are merged. An
+/// event is known by its indices, never by taking the sum apart again.
+struct Events<'a> {
+    rows: &'a [f64],
+    columns: &'a [f64],
+    heads: &'a mut Heads,
+    left: usize,
+    rows_are_knots: bool,
+}
+
+impl<'a> Events<'a> {
+    fn new(knots: &'a [f64], offsets: &'a [f64], heads: &'a mut Heads) -> Self {
+        // Fewer rows make fewer comparisons.
+        let rows_are_knots = knots.len() <= offsets.len();
+        let (rows, columns) = if rows_are_knots { (knots, offsets) } else { (offsets, knots) };
+        heads.sums.clear();
+        heads.sums.extend(rows.iter().map(|row| row + columns[0]));
+        heads.columns.clear();
+        heads.columns.extend(rows.iter().map(|_| 0));
+        Self { rows, columns, heads, left: rows.len() * columns.len(), rows_are_knots }
     }
 }
 
-/// All events of axles at `offsets` on a line with `knots`, as `visit(place of the lead, knot, axle)`.
-fn events(knots: &[f64], offsets: &[f64], heads: &mut Heads, mut visit: impl FnMut(f64, usize, usize)) {
-    if knots.len() <= offsets.len() {
-        merge(knots, offsets, heads, visit);
-    } else {
-        merge(offsets, knots, heads, |p, axle, knot| visit(p, knot, axle));
+impl Iterator for Events<'_> {
+    type Item = (f64, usize, usize);
+
+    #[inline(always)]
+    fn next(&mut self) -> Option<Self::Item> {
+        if self.left == 0 {
+            return None;
+        }
+        self.left -= 1;
+        // Selections instead of branches: which row is next cannot be foreseen.
+        let (mut row, mut sum) = (0, self.heads.sums[0]);
+        for (r, &other) in self.heads.sums.iter().enumerate().skip(1) {
+            row = if other < sum { r } else { row };
+            sum = if other < sum { other } else { sum };
+        }
+        let column = self.heads.columns[row];
+        self.heads.columns[row] = column + 1;
+        self.heads.sums[row] = self.columns.get(column + 1).map_or(f64::INFINITY, |c| self.rows[row] + c);
+        Some(if self.rows_are_knots { (sum, row, column) } else { (sum, column, row) })
     }
 }
 
@@ -53,6 +77,7 @@ pub(super) fn sweep(f: &Piecewise, loads: &[f64], offsets: &[f64], touch: f64, h
     }
 }
 
+/// Carries the effect over all events; on straight pieces without the terms that vanish.
 fn walk<const STRAIGHT: bool>(
     f: &Piecewise,
     loads: &[f64],
@@ -61,19 +86,17 @@ fn walk<const STRAIGHT: bool>(
     heads: &mut Heads,
 ) -> Swept {
     let jumps = f.jumps();
-    // The effect as a polynomial about `place`, and its one-sided value before the event there.
-    let (mut effect, mut place, mut before) = (Cubic::ZERO, f64::NEG_INFINITY, 0.0);
-    // What axles at a jump add when each counts at the side that is worse.
-    let (mut up, mut down) = (0.0, 0.0);
+    // The effect as a polynomial about `place`: nothing is on the bridge before the first event.
+    let (mut effect, mut place) = (Cubic::ZERO, f.knots()[0] + offsets[0]);
+    // The values at `place` when each axle at a jump counts at its larger or at its smaller side.
+    let (mut high, mut low) = (0.0, 0.0);
     let (mut most, mut least) = ((0.0, 0.0), (0.0, 0.0));
-    events(f.knots(), offsets, heads, |p, knot, axle| {
-        if p - place > touch {
-            let h = p - place;
+    for (p, knot, axle) in Events::new(f.knots(), offsets, heads) {
+        let h = p - place;
+        if h > touch {
             if STRAIGHT {
-                if h.is_finite() {
-                    effect.0[0] += h * effect.0[1];
-                }
-            } else if h.is_finite() {
+                effect.0[0] += h * effect.0[1];
+            } else {
                 let bounds = effect.bounds(h);
                 if bounds.1 > most.0 || bounds.0 < least.0 {
                     for &t in effect.stationary(h).iter() {
@@ -88,7 +111,7 @@ fn walk<const STRAIGHT: bool>(
                 }
                 effect = effect.about(h);
             }
-            (place, before, up, down) = (p, effect.0[0], 0.0, 0.0);
+            (place, high, low) = (p, effect.0[0], effect.0[0]);
         }
         let (load, jump) = (loads[axle], &jumps[knot].0);
         let step = load * jump[0];
@@ -98,15 +121,15 @@ fn walk<const STRAIGHT: bool>(
             effect.0[2] += load * jump[2];
             effect.0[3] += load * jump[3];
         }
-        up += step.max(0.0);
-        down += step.min(0.0);
-        if before + up > most.0 {
-            most = (before + up, place);
+        high += step.max(0.0);
+        low += step.min(0.0);
+        if high > most.0 {
+            most = (high, place);
         }
-        if before + down < least.0 {
-            least = (before + down, place);
+        if low < least.0 {
+            least = (low, place);
         }
-    });
+    }
     Swept { most, least, rest: effect }
 }
 
@@ -123,19 +146,17 @@ pub(super) fn trace(
     mut visit: impl FnMut(f64, f64, Cubic),
 ) {
     let jumps = f.jumps();
-    let (mut effect, mut place, mut before, mut up) = (Cubic::ZERO, f64::NEG_INFINITY, 0.0, 0.0);
-    events(f.knots(), offsets, heads, |p, knot, axle| {
+    let (mut effect, mut place, mut before, mut up) = (Cubic::ZERO, f.knots()[0] + offsets[0], 0.0, 0.0);
+    for (p, knot, axle) in Events::new(f.knots(), offsets, heads) {
         if p - place > touch {
-            if place.is_finite() {
-                visit(place, before + up, effect);
-                effect = effect.about(p - place);
-            }
+            visit(place, before + up, effect);
+            effect = effect.about(p - place);
             (place, before, up) = (p, effect.0[0], 0.0);
         }
         let jump = jumps[knot] * (sign * loads[axle]);
         effect += jump;
         up += jump.0[0].max(0.0);
-    });
+    }
     visit(place, before + up, effect);
 }
 
@@ -145,25 +166,19 @@ mod tests {
 
     #[test]
     fn sums_come_in_order_and_with_their_indices() {
-        let (rows, columns) = ([0.0, 3.0, 10.0], [0.0, 1.0, 3.0, 7.0]);
-        let mut seen = Vec::new();
-        for swap in [false, true] {
+        let (short, long) = ([0.0, 3.0, 10.0], [0.0, 1.0, 3.0, 7.0]);
+        for (knots, offsets) in [(&short[..], &long[..]), (&long[..], &short[..])] {
             let mut last = f64::NEG_INFINITY;
-            let mut visit = |p: f64, k: usize, i: usize| {
+            let mut seen = Vec::new();
+            for (p, knot, axle) in Events::new(knots, offsets, &mut Heads::default()) {
                 assert!(p >= last);
                 last = p;
-                assert_eq!(p, rows[k] + columns[i]);
-                seen.push((k, i));
-            };
-            if swap {
-                events(&rows, &columns, &mut Vec::new(), &mut visit);
-            } else {
-                events(&columns, &rows, &mut Vec::new(), |p, i, k| visit(p, k, i));
+                assert_eq!(p, knots[knot] + offsets[axle]);
+                seen.push((knot, axle));
             }
             seen.sort_unstable();
             seen.dedup();
             assert_eq!(seen.len(), 12);
-            seen.clear();
         }
     }
 }

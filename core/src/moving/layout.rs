@@ -26,8 +26,9 @@ pub(super) struct Layout {
 }
 
 impl Layout {
-    /// Takes a train as it is or with its order reversed, using the memory again.
-    pub fn set(&mut self, train: &AxleTrain, reversed: bool) {
+    /// Takes a train as it is or with its order reversed, using the memory again; `closed_up`, every
+    /// variable spacing is fixed at its least.
+    pub fn set(&mut self, train: &AxleTrain, reversed: bool, closed_up: bool) {
         let n = train.axles().len();
         let nth = |i: usize, of: usize| if reversed { of - 1 - i } else { i };
         self.loads.clear();
@@ -43,7 +44,7 @@ impl Layout {
             }
             let spacing = train.spacings()[nth(i, n - 1)];
             let (least, most) = (spacing.least().base(), spacing.most().base());
-            if least < most {
+            if least < most && !closed_up {
                 self.groups.push(Group { start, end: i + 1, gap: (offset + least, offset + most) });
                 (start, offset) = (i + 1, 0.0);
             } else {

@@ -13,8 +13,9 @@
 //! never positive.
 //!
 //! **Numbers.** Places are counted in 0.1 mm, so that whole inches and their binary fractions meet
-//! exactly; places within some units in the last digit are one. Values below 1e-11 of the weight of the train times the peak
-//! of the line are 0. After the last axle has gone nothing may be left: that is checked each time.
+//! exactly; places within some units in the last digit are one. Values below 1e-11 of the weight of the
+//! train times the scale of the line (its peak, except close to a support) are 0. After the last axle
+//! has gone nothing may be left: that is checked each time.
 //!
 //! Values are in base units: N for forces, N times 0.1 mm for moments.
 

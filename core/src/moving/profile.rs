@@ -4,6 +4,10 @@
 use super::events::{Heads, trace};
 use crate::numerics::{Cubic, Piecewise};
 
+/// A maximum this near to an end of its piece, as a part of the length, differs from the value at that
+/// end by the square of this.
+const AT_END: f64 = 1e-9;
+
 /// A piecewise-cubic function of a place, zero outside its knots, closed from above: at a knot it has
 /// the larger value that the axles there can take. Pieces have no maximum of their own inside, since a
 /// knot is put there.
@@ -34,9 +38,11 @@ impl Profile {
     /// Adds a knot, and one at each maximum inside the piece before it.
     fn push(&mut self, knot: f64, at: f64, after: Cubic) {
         if let (Some(&from), Some(&piece)) = (self.knots.last(), self.after.last()) {
-            for &t in piece.stationary(knot - from).iter() {
+            let h = knot - from;
+            for &t in piece.stationary(h).iter() {
                 let bent = piece.about(t);
-                if bent.0[2] < 0.0 {
+                // A maximum all but at an end is that of the knot there.
+                if bent.0[2] < 0.0 && t > AT_END * h && t < (1.0 - AT_END) * h {
                     self.knots.push(from + t);
                     self.at.push(bent.0[0]);
                     self.after.push(bent);
@@ -240,4 +246,75 @@ fn clear_winner(rivals: &[(From, Cubic); 3], h: f64) -> bool {
         }
     }
     rivals.iter().enumerate().all(|(i, rival)| i == best.0 || rival.1.bounds(h).1 <= best.1)
+}
+
+#[cfg(test)]
+mod tests {
+    use super::*;
+
+    fn of(f: &Piecewise, loads: &[f64], offsets: &[f64]) -> Profile {
+        let mut made = Profile::default();
+        made.of_group(f, 1.0, loads, offsets, 1e-9, &mut Heads::default());
+        made
+    }
+
+    /// A wave, a jump down, and a slope below zero.
+    fn sample() -> Piecewise {
+        let pieces = vec![Cubic([0.0, 6.0, -6.0, 1.25]), Cubic::line(2.0, -1.0)];
+        Piecewise::new(vec![0.0, 3.0, 6.0], pieces).expect("well formed")
+    }
+
+    fn at(p: &Profile, place: f64) -> f64 {
+        p.upper(place, 1e-9)
+    }
+
+    #[test]
+    fn a_group_is_the_sum_of_its_axles() {
+        let (f, p) = (sample(), of(&sample(), &[2.0, 5.0], &[0.0, 1.5]));
+        for i in -20..200 {
+            let place = f64::from(i) / 16.0;
+            let want = 2.0 * f.upper(place, 1e-9) + 5.0 * f.upper(place - 1.5, 1e-9);
+            assert!((at(&p, place) - want).abs() < 1e-12, "{place}: {} {want}", at(&p, place));
+        }
+    }
+
+    #[test]
+    fn a_window_holds_the_best_of_its_places() {
+        let p = of(&sample(), &[1.0, 1.0], &[0.0, 0.75]);
+        for (near, far) in [(0.5, 0.75), (1.0, 3.0), (0.25, 20.0)] {
+            let mut window = Profile::default();
+            window.window(&p, near, far, 1e-9, &mut Vec::new());
+            for i in -20..500 {
+                let place = f64::from(i) / 16.0;
+                let found = p.best_within(place - far, place - near, 1e-9);
+                assert!((at(&window, place) - at(&p, found)).abs() < 1e-12, "{place}");
+                // Nothing in the window is better, by a fine grid that meets all knots.
+                for j in 0..=640 {
+                    let inside = place - near - (far - near) * f64::from(j) / 640.0;
+                    assert!(at(&p, inside) <= at(&window, place) + 1e-12, "{place} {inside}");
+                }
+            }
+        }
+    }
+
+    #[test]
+    fn knots_within_touch_are_one_place() {
+        let p = of(&sample(), &[1.0], &[0.0]);
+        let mut moved = p.clone();
+        for knot in &mut moved.knots {
+            *knot += 4e-10;
+        }
+        let mut sum = Profile::default();
+        sum.sum(&p, &moved, 1e-9);
+        assert_eq!(sum.knots.len(), p.knots.len());
+        for (doubled, once) in sum.at.iter().zip(&p.at) {
+            assert!((doubled - 2.0 * once).abs() < 1e-8);
+        }
+        // Two knots of one profile so near to each other: the larger value holds.
+        let mut twin = p.clone();
+        twin.knots.insert(1, twin.knots[1] - 5e-10);
+        twin.at.insert(1, 100.0);
+        twin.after.insert(1, Cubic::ZERO);
+        assert_eq!(at(&twin, p.knots[1]), 100.0);
+    }
 }

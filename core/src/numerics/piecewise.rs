@@ -13,7 +13,10 @@ pub struct Piecewise {
     jumps: Vec<Cubic>,
     least: f64,
     largest: f64,
+    scale: f64,
     straight: bool,
+    /// Whether it is one hump above zero, and whether it is one below.
+    humps: [bool; 2],
 }
 
 /// A stretch on which a function keeps one sign.
@@ -60,6 +63,10 @@ impl Piecewise {
             }
         }
         self.jumps.push(Cubic::ZERO - before);
+        let steepest = self.jumps.iter().fold(0.0, |s: f64, jump| s.max(jump.0[1].abs()));
+        let length = self.knots[self.knots.len() - 1] - self.knots[0];
+        self.scale = self.peak().max(1e-3 * steepest * length);
+        self.humps = [1.0, -1.0].map(|sign| self.is_hump(sign));
     }
 
     /// The knots, ascending.
@@ -103,6 +110,39 @@ impl Piecewise {
     #[must_use]
     pub fn peak(&self) -> f64 {
         self.largest.max(-self.least)
+    }
+
+    /// Whether the function, times `sign` (1 or -1), is a single hump: nowhere below zero, rising to one
+    /// place and falling beyond it; jumps count as steep slopes.
+    #[must_use]
+    pub fn is_single_hump(&self, sign: f64) -> bool {
+        self.humps[usize::from(sign < 0.0)]
+    }
+
+    fn is_hump(&self, sign: f64) -> bool {
+        let noise = 1e-14 * self.scale;
+        let (mut last, mut falls) = (0.0, false);
+        for (_, h, piece) in self.spans() {
+            // Between these values a cubic rises or falls throughout.
+            let turns = piece.stationary(h);
+            for t in core::iter::once(0.0).chain(turns.iter().copied()).chain(core::iter::once(h)) {
+                let value = sign * piece.at(t);
+                if value < -noise || (falls && value > last + noise) {
+                    return false;
+                }
+                falls |= value < last - noise;
+                last = value;
+            }
+        }
+        true
+    }
+
+    /// What round-off is measured against: the peak, or a thousandth of the steepest slope times the
+    /// length where that is more. A function that is small only because it is over soon after it has
+    /// risen has no more digits than the places of its knots.
+    #[must_use]
+    pub fn scale(&self) -> f64 {
+        self.scale
     }
 
     /// The two one-sided values at `x`, before and after it, equal where the function is continuous.
@@ -180,7 +220,7 @@ impl Piecewise {
     /// Calls `visit(knot, from, to, piece, sign)` for each stretch of one sign, from left to right;
     /// `from` and `to` count from the knot of the piece.
     fn for_each_sign(&self, mut visit: impl FnMut(f64, f64, f64, &Cubic, f64)) {
-        let noise = 1e-14 * self.peak();
+        let noise = 1e-14 * self.scale;
         for (knot, h, piece) in self.spans() {
             let mut from = 0.0;
             let changes = piece.sign_changes(h);
@@ -243,6 +283,23 @@ mod tests {
             at = *k;
         }
         assert!(sum.0.iter().all(|c| c.abs() < 1e-14), "{sum:?}");
+    }
+
+    #[test]
+    fn single_humps() {
+        let of = |pieces: &[[f64; 4]]| {
+            let knots = (0..=pieces.len()).map(|i| i as f64).collect();
+            let f = Piecewise::new(knots, pieces.iter().map(|&c| Cubic(c)).collect()).expect("well formed");
+            (f.is_single_hump(1.0), f.is_single_hump(-1.0))
+        };
+        assert_eq!(of(&[[0.0, 1.0, 0.0, 0.0], [1.0, -1.0, 0.0, 0.0]]), (true, false));
+        assert_eq!(of(&[[1.0, -1.0, 0.0, 0.0]]), (true, false));
+        assert_eq!(of(&[[0.0, -1.0, 0.0, 0.0]]), (false, true));
+        assert_eq!(of(&[[0.0, -0.5, 0.0, 0.0], [0.5, -0.5, 0.0, 0.0]]), (false, false));
+        // Two humps, and a hump within one piece.
+        assert_eq!(of(&[[0.0, 4.0, -4.0, 0.0], [0.0, 4.0, -4.0, 0.0]]), (false, false));
+        assert_eq!(of(&[[0.0, 4.0, -4.0, 0.0]]), (true, false));
+        assert_eq!(of(&[[0.0; 4]]), (true, true));
     }
 
     #[test]

@@ -5,8 +5,7 @@ use super::reader::{Reader, Wrong};
 use super::site::Year;
 use crate::bridge::{Deck, Layer, Stage, Strip, StripSide};
 use crate::document::book::{Placed, Side, Substance};
-use crate::material::Defaults;
-use crate::material::{Concrete, weight};
+use crate::material::{Concrete, Defaults, weight};
 use crate::quantity::Length;
 use crate::units::{Entered, Provenance};
 
@@ -51,7 +50,7 @@ fn left_curb(
     let entered = reader.maybe::<Length>("deck.left_curb");
     let (width, roadway) = (width?.value, roadway?.value);
     if roadway > width {
-        let over = reader.shown("deck.roadway", roadway - width);
+        let over = reader.told("deck.roadway", roadway - width);
         reader.error(
             "deck.roadway",
             format!("the roadway is {over} wider than the deck"),
@@ -67,7 +66,7 @@ fn left_curb(
                 .value,
         ),
         Ok(Some(curb)) if curb.value + roadway > width => {
-            let over = reader.shown("deck.left_curb", curb.value + roadway - width);
+            let over = reader.told("deck.left_curb", curb.value + roadway - width);
             reader.error(
                 "deck.left_curb",
                 format!("the roadway ends {over} beyond the right edge of the deck"),

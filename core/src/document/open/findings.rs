@@ -90,13 +90,13 @@ fn range(
     }
     let length = &span?.length;
     if to.value > length.value {
-        let over = reader.shown(&to.path, to.value - length.value);
+        let over = reader.told(&to.path, to.value - length.value);
         reader.error(
             &to.path,
             format!("the finding ends {over} beyond the far bearing"),
             format!(
                 "check it against the span of {}",
-                reader.shown(&format!("findings.{}.to", saved.id.0), length.value)
+                reader.told(&format!("findings.{}.to", saved.id.0), length.value)
             ),
         );
         return None;
@@ -114,7 +114,7 @@ fn left(
     if let (Some(left), Some(sound)) = (&entered, sound)
         && left.value > sound.value
     {
-        let (is, was) = (reader.shown(path, left.value), reader.shown(path, sound.value));
+        let (is, was) = (reader.told(path, left.value), reader.told(path, sound.value));
         reader.error(
             path,
             format!("{is} left is more than the {was} of the sound girder"),

@@ -84,7 +84,7 @@ pub(super) fn lines(
         && let Some(girder) = book.girders.last()
     {
         let path = format!("girders.{}.spacing", girder.id.0);
-        let over = reader.shown(&path, last - deck.width.value);
+        let over = reader.told(&path, last - deck.width.value);
         reader.error(
             &path,
             format!("{} stands {over} outside the deck", named(girder, book.girders.len() - 1)),

@@ -121,7 +121,10 @@ impl<'a> Reader<'a> {
         source: &'static str,
         from: Provenance,
     ) -> Entered<Q> {
-        let text = self.shown(path, value);
+        let text = match fields::form(path) {
+            Some(Form::Quantity(measure)) => readings::shown(value, measure, self.book.system),
+            _ => String::new(),
+        };
         self.filled.push(Filled { path: path.to_string(), text, from, source });
         Entered { provenance: from, ..Entered::assumed(path, value, source) }
     }
@@ -144,10 +147,10 @@ impl<'a> Reader<'a> {
         self.problems.push(Problem::warning(path, message, mend));
     }
 
-    /// A quantity as the book shows it, for messages about the field at `path`.
-    pub(super) fn shown<Q: Quantity>(&self, path: &str, value: Q) -> String {
+    /// A quantity in the unit of the field at `path`, for a message about it.
+    pub(super) fn told<Q: Quantity>(&self, path: &str, value: Q) -> String {
         match fields::form(path) {
-            Some(Form::Quantity(measure)) => readings::shown(value, measure, self.book.system),
+            Some(Form::Quantity(measure)) => readings::told(value, measure, self.book.system),
             _ => String::new(),
         }
     }

@@ -62,8 +62,9 @@ pub fn types() -> End {
 
 /// Finds Chromium, or installs Debian's when this user may.
 pub fn chromium() -> Outcome<String> {
-    let path = std::env::var("CHROMIUM").unwrap_or_else(|_| "/usr/bin/chromium".into());
-    if !Path::new(&path).exists() && is_root() {
+    let named = std::env::var("CHROMIUM").ok();
+    let path = named.clone().unwrap_or_else(|| "/usr/bin/chromium".into());
+    if !Path::new(&path).exists() && named.is_none() && is_root() {
         // Why it failed is on the screen; whether it worked is what the next look tells.
         watch(place::command("apt-get").arg("update"));
         watch(

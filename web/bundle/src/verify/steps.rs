@@ -21,7 +21,7 @@ pub fn all() -> Vec<Step> {
         step("formatting", &[], || cargo(&["fmt", "--all", "--check"])),
         step("lints", &[], || cargo(&["clippy", "--workspace", "--all-targets", "--", "-D", "warnings"])),
         step("documentation", &[], documentation),
-        step("tests", &[], || cargo(&["test", "--workspace"])),
+        step("tests", &[], || cargo(&["test", "--workspace", "--no-fail-fast"])),
         step("page", &[], || settle(dist::build().map(|()| String::new()))),
         step("crates", &[], || settle(shipped::crates())),
         step("vectors", &["page"], || settle(shipped::vectors())),

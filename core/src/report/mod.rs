@@ -1,6 +1,6 @@
 //! The words: what is said of a rating, and how its tables and worksheets read.
 //!
-//! - [`verdict`]: the least factor, what follows, why, and what it does not cover;
+//! - [`mod@verdict`]: the least factor, what follows, why, and what it does not cover;
 //! - [`sign`]: what stands on the sign;
 //! - [`tables`]: rating by vehicle, girders, posting, what went into a check;
 //! - [`sheet`]: the lines of a worksheet;

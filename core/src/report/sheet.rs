@@ -1,6 +1,6 @@
 //! The lines of a worksheet as text: what stands where on the sheet that a second engineer checks.
 //!
-//! Figures are printed by [`figure`](super::figure::figure). A formula line shows the formula, the
+//! Figures are printed by [`figure`]. A formula line shows the formula, the
 //! formula with the figures put in, and the result in the unit of the clause; where that is not the
 //! book's, the result in the book's as well.
 

@@ -11,11 +11,21 @@ use crate::key;
 use crate::node::Node;
 use crate::scene::Scene;
 
-const BAR_LEFT: i32 = 170;
-const BAR_RIGHT: i32 = 430;
+const BAR_LEFT: i32 = 204;
+const BAR_RIGHT: i32 = 444;
 /// The factor at the right end of a bar.
 const MOST: f64 = 2.0;
 const ROW: i32 = 25;
+/// Most characters of a name that fit before the weight.
+const NAME: usize = 15;
+
+/// A name as far as it has room.
+fn short(name: &str) -> String {
+    match name.char_indices().nth(NAME) {
+        None => name.to_owned(),
+        Some(_) => name.chars().take(NAME - 1).chain(['…']).collect(),
+    }
+}
 
 /// The drawing.
 pub fn node(s: &Scene, rating: &Rating) -> Node {
@@ -41,9 +51,9 @@ pub fn node(s: &Scene, rating: &Rating) -> Node {
             None => ("no number".to_owned(), false, 0.0, String::new()),
         };
         let text = y + 15;
-        canvas.label_to((10, text), "strong", "start", name.clone(), &go);
+        canvas.label_to((10, text), "strong", "start", short(&name), &go);
         canvas.label(
-            (152, text),
+            (194, text),
             "small",
             "end",
             load.weight.map_or(String::new(), |w| weight(w, s.system())),
@@ -53,8 +63,8 @@ pub fn node(s: &Scene, rating: &Rating) -> Node {
         let class = if low { "bar-low" } else { "bar-ok" };
         canvas.part(class, rect(BAR_LEFT, y + 3, end, y + 19), &go, &format!("{name} {figure}"));
         let class = if low { "low" } else { "strong" };
-        canvas.label((442, text), class, "start", figure.clone());
-        canvas.label((528, text), if low { "low" } else { "small" }, "start", words.clone());
+        canvas.label((456, text), class, "start", figure.clone());
+        canvas.label((540, text), if low { "low" } else { "small" }, "start", words.clone());
         said.push(format!("{name} {figure}, {words}"));
         y += ROW;
     }

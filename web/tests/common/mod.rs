@@ -1,7 +1,7 @@
 //! Books and views for the tests of the open book.
 #![allow(dead_code)]
 
-use std::collections::HashMap;
+use std::collections::BTreeMap;
 
 use girderbook_core::document::book::UnitSystem;
 use girderbook_web::desk::Desk;
@@ -69,7 +69,7 @@ pub fn texts(view: &View, name: &str, kind: &str) -> Vec<String> {
 }
 
 pub fn assert_ids_unique(view: &View, what: &str) {
-    let mut seen: HashMap<&str, &str> = HashMap::new();
+    let mut seen: BTreeMap<&str, &str> = BTreeMap::new();
     for node in nodes(view) {
         assert!(!node.id.is_empty(), "{what}: a {} has no id", node.k);
         let before = seen.insert(&node.id, node.k);

@@ -221,8 +221,18 @@ fn reasons(rating: &Rating, governing: Option<&Check>, system: System) -> Vec<St
             outcome(&next.outcome)
         ));
     }
+    // The same reason at several places is said once.
+    let mut said: Vec<(&str, usize)> = Vec::new();
     for problem in &rating.not_rated {
-        reasons.push(sentence("Not rated: ", &problem.message));
+        match said.iter_mut().find(|(message, _)| *message == problem.message) {
+            Some((_, places)) => *places += 1,
+            None => said.push((&problem.message, 1)),
+        }
+    }
+    for (message, places) in said {
+        let at =
+            if places > 1 { format!("Not rated at {places} places: ") } else { "Not rated: ".to_owned() };
+        reasons.push(sentence(&at, message));
     }
     reasons
 }

@@ -37,7 +37,8 @@ const KINDS = { region, heading, text, group, field, choice, button, link, list,
 
 /** @returns {Mounted} */
 function region() {
-  const element = make('section', { class: 'region' });
+  // A group, not a landmark: a page would have dozens of them.
+  const element = make('div', { class: 'region', role: 'group' });
   const set = (/** @type {string} */ name, /** @type {string} */ value) => {
     if (name === 'label') attribute(element, 'aria-label', value);
     if (name === 'tone') attribute(element, 'data-tone', value);

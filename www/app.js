@@ -111,8 +111,9 @@ function open(name) {
 function tabs() {
   const all = /** @type {{id: string, title: string, badge: string}[]} */ (withBook((b) => b.pages()) ?? []);
   part('tabs').replaceChildren(...all.map(({ id, title }) => {
-    const badge = make('span', { class: 'badge', hidden: '' });
-    const tab = make('button', { type: 'button', 'data-page': id }, make('span', { text: title }), badge);
+    const badge = make('span', { class: 'badge', 'aria-hidden': 'true', hidden: '' });
+    const todo = make('span', { class: 'unseen' });
+    const tab = make('button', { type: 'button', 'data-page': id }, make('span', { text: title }), badge, todo);
     if (id === page) tab.setAttribute('aria-current', 'page');
     tab.addEventListener('click', () => open(id));
     return tab;
@@ -123,12 +124,13 @@ function tabs() {
 /** How many entries of each page keep a rating from being built. */
 function badges() {
   const all = /** @type {{id: string, title: string, badge: string}[]} */ (withBook((b) => b.pages()) ?? []);
-  for (const { id, title, badge } of all) {
+  for (const { id, badge } of all) {
     const tab = document.querySelector(`#tabs [data-page="${id}"]`);
     const mark = tab?.querySelector('.badge');
-    if (!(mark instanceof HTMLElement) || !tab) continue;
+    const todo = tab?.querySelector('.unseen');
+    if (!(mark instanceof HTMLElement) || !todo) continue;
     words(mark, badge);
-    tab.setAttribute('aria-label', badge ? `${title}, ${badge} to enter or mend` : title);
+    todo.textContent = badge ? `, ${badge} to enter or mend` : '';
   }
 }
 

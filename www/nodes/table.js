@@ -24,8 +24,9 @@ function tableRow(node, hands) {
   const head = node.p.head === '1';
   const target = node.p.go;
   let first = true;
-  const child = () => {
-    const cell = tableCell(head, first ? target : undefined, hands);
+  const child = (/** @type {TreeNode} */ cellNode) => {
+    // A head without words is no head.
+    const cell = tableCell(head && Boolean(cellNode.p.text), first ? target : undefined, hands);
     first = false;
     return cell;
   };

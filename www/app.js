@@ -10,7 +10,6 @@ import { keepOffline } from './trust.js';
 
 /** @type {import('./border.js').OpenBook | null} */
 let book = null;
-let bookId = '';
 let page = 'site';
 /** Text of the book as it was last taken over, for a fresh instance after a panic. */
 let last = '';
@@ -112,8 +111,9 @@ function open(name) {
 function tabs() {
   const all = /** @type {{id: string, title: string, badge: string}[]} */ (withBook((b) => b.pages()) ?? []);
   part('tabs').replaceChildren(...all.map(({ id, title }) => {
-    const badge = make('span', { class: 'badge', hidden: '' });
-    const tab = make('button', { type: 'button', 'data-page': id }, make('span', { text: title }), badge);
+    const badge = make('span', { class: 'badge', 'aria-hidden': 'true', hidden: '' });
+    const todo = make('span', { class: 'unseen' });
+    const tab = make('button', { type: 'button', 'data-page': id }, make('span', { text: title }), badge, todo);
     if (id === page) tab.setAttribute('aria-current', 'page');
     tab.addEventListener('click', () => open(id));
     return tab;
@@ -124,12 +124,13 @@ function tabs() {
 /** How many entries of each page keep a rating from being built. */
 function badges() {
   const all = /** @type {{id: string, title: string, badge: string}[]} */ (withBook((b) => b.pages()) ?? []);
-  for (const { id, title, badge } of all) {
+  for (const { id, badge } of all) {
     const tab = document.querySelector(`#tabs [data-page="${id}"]`);
     const mark = tab?.querySelector('.badge');
-    if (!(mark instanceof HTMLElement) || !tab) continue;
+    const todo = tab?.querySelector('.unseen');
+    if (!(mark instanceof HTMLElement) || !todo) continue;
     words(mark, badge);
-    tab.setAttribute('aria-label', badge ? `${title}, ${badge} to enter or mend` : title);
+    todo.textContent = badge ? `, ${badge} to enter or mend` : '';
   }
 }
 
@@ -168,7 +169,6 @@ async function openBook(id, text, fresh) {
   }
   const mine = await keeper.begin(id);
   book = opened.book;
-  bookId = id;
   last = text;
   history.replaceState(null, '', `#${id}`);
   part('shelf').hidden = true;
@@ -187,7 +187,6 @@ async function toShelf() {
   await keeper.end();
   book?.free();
   book = null;
-  bookId = '';
   history.replaceState(null, '', '#');
   part('book').hidden = true;
   part('shelf').hidden = false;

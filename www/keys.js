@@ -19,7 +19,7 @@ let target = null;
 /** Shows the row while a length is written. */
 export function keys() {
   const row = part('keys');
-  row.setAttribute('role', 'group');
+  row.setAttribute('role', 'region');
   row.setAttribute('aria-label', 'Signs for readings');
   for (const [text, name] of KEYS) {
     const key = make('button', { type: 'button', text: text.trim(), 'aria-label': name });

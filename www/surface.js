@@ -35,9 +35,10 @@ import { table } from './nodes/table.js';
 /** @type {{[kind: string]: (node: TreeNode, hands: Hands) => Mounted}} */
 const KINDS = { region, heading, text, group, field, choice, button, link, list, table, drawing, line, title: sheetTitle, figure };
 
-/** @param {TreeNode} node @returns {Mounted} */
-function region(node) {
-  const element = make('section', { class: 'region' });
+/** @returns {Mounted} */
+function region() {
+  // A group, not a landmark: a page would have dozens of them.
+  const element = make('div', { class: 'region', role: 'group' });
   const set = (/** @type {string} */ name, /** @type {string} */ value) => {
     if (name === 'label') attribute(element, 'aria-label', value);
     if (name === 'tone') attribute(element, 'data-tone', value);

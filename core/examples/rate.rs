@@ -8,7 +8,7 @@
 use std::process::ExitCode;
 
 use girderbook_core::basis::mbe_a::MbeA;
-use girderbook_core::check::{Action, Level, Limit, LimitState, Outcome, Sign};
+use girderbook_core::check::{Action, ClassLimit, Level, Limit, LimitState, Outcome, Sign};
 use girderbook_core::document;
 use girderbook_core::problem::Problem;
 use girderbook_core::quantity::{Force, Moment, Quantity, Stress};
@@ -127,11 +127,19 @@ fn check(rating: &Rating, c: &Check) -> Value {
     })
 }
 
+fn class_limit(limit: ClassLimit) -> Value {
+    match limit {
+        ClassLimit::None => Value::Null,
+        ClassLimit::Weight(weight) => json!(weight),
+        ClassLimit::NotAllowed => json!("not allowed"),
+    }
+}
+
 fn posting(rating: &Rating) -> Value {
     let sign = match rating.posting.sign {
         Sign::None => json!({ "needed": false }),
         Sign::Limit { single_unit, combination, unit } => json!({
-            "needed": true, "single_unit": single_unit, "combination": combination,
+            "needed": true, "single_unit": class_limit(single_unit), "combination": class_limit(combination),
             "unit": match unit { WeightUnit::ShortTons => "short tons", WeightUnit::Tonnes => "tonnes" },
         }),
         Sign::Close => json!({ "close": true }),

@@ -36,6 +36,7 @@ mod printed {
         Operator::make_bin("min", binary(f64::min, 4, false)),
         Operator::make_bin("max", binary(f64::max, 4, false)),
         Operator::make_unary("sqrt", f64::sqrt),
+        Operator::make_unary("floor", f64::floor),
         Operator::make_unary("tan_deg", |a| a.to_radians().tan()),
         Operator::make_constant("PI", core::f64::consts::PI)
     );

@@ -1,5 +1,6 @@
-//! Helpers of the tests: reading reference data, evaluating formulas independently, vehicle tables.
+//! Helpers of the tests: reading reference data, evaluating formulas independently, bridges, vehicle tables.
 
+pub mod bridges;
 pub mod evaluate;
 pub mod moving_reference;
 pub mod reference_set;

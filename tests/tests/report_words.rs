@@ -1,7 +1,9 @@
 //! The words of a verdict and its tables, pinned. The ratings here are made by hand: they hold
 //! figures for the words, not results.
 
-use girderbook_core::check::{Action, Class, Level, Limit, LimitState, Outcome, Posting, SafeLoad, Sign};
+use girderbook_core::check::{
+    Action, Class, ClassLimit, Level, Limit, LimitState, Outcome, Posting, SafeLoad, Sign,
+};
 use girderbook_core::problem::Problem;
 use girderbook_core::quantity::{Force, Length, LineLoad};
 use girderbook_core::rating::{
@@ -100,7 +102,11 @@ fn rating() -> Rating {
             vehicle(3, Some(1), Some(0), Some(0), Some(28.8)),
         ],
         posting: Posting {
-            sign: Sign::Limit { single_unit: Some(25), combination: None, unit: WeightUnit::Tonnes },
+            sign: Sign::Limit {
+                single_unit: ClassLimit::Weight(25),
+                combination: ClassLimit::None,
+                unit: WeightUnit::Tonnes,
+            },
             safe: vec![
                 safe(1, 1.2149, Limit::Full),
                 safe(2, 1.1733, Limit::Full),
@@ -178,9 +184,19 @@ fn every_posting_has_its_sentence() {
     let barred = vec![SafeLoad { load: 1, factor: Some(0.2), limit: Limit::NotAllowed }];
     for (sign, safe, words) in [
         (Sign::None, vec![], "Carries all legal loads: no posting."),
-        (limit(Some(21), Some(34)), vec![], "Post: single-unit trucks 21 tons, combinations 34 tons."),
-        (limit(Some(12), Some(12)), vec![], "Post for all trucks: 12 tons."),
-        (limit(None, Some(34)), vec![], "Post for combinations: 34 tons."),
+        (
+            limit(ClassLimit::Weight(21), ClassLimit::Weight(34)),
+            vec![],
+            "Post: single-unit trucks 21 tons, combinations 34 tons.",
+        ),
+        (limit(ClassLimit::Weight(12), ClassLimit::Weight(12)), vec![], "Post for all trucks: 12 tons."),
+        (limit(ClassLimit::None, ClassLimit::Weight(34)), vec![], "Post for combinations: 34 tons."),
+        (
+            limit(ClassLimit::NotAllowed, ClassLimit::Weight(34)),
+            vec![],
+            "Post: single-unit trucks not allowed, combinations 34 tons.",
+        ),
+        (limit(ClassLimit::NotAllowed, ClassLimit::NotAllowed), vec![], "Post: no trucks."),
         (Sign::Close, barred, "Close: no legal truck may cross."),
         (Sign::Close, vec![], "Close: what it safely carries is below the least limit of an open bridge."),
         (Sign::NotKnown, vec![], "No answer on posting: something that has to be rated got no number."),

@@ -55,7 +55,7 @@ pub fn regions(s: &Scene) -> Vec<Node> {
     // What can be taken back comes and goes; the button stays in its place.
     let undo = if s.undo { "undo" } else { "" };
     let region = Node::region("head", "Bridge")
-        .and(Node::new("heading").with("text", title(s.book)).with("level", "2"))
+        .and(Node::new("heading").with("text", title(s.book)).with("level", "1"))
         .and(Node::new("text").with("text", about.join(" · ")).with("tone", "quiet"))
         .and(Node::new("link").with("text", units).with("go", "system"))
         .and(Node::new("link").with("text", s.rules).with("go", "rule_set"))

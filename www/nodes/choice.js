@@ -7,8 +7,8 @@ import { attribute, make, words } from '../dom.js';
 
 let count = 0;
 
-/** @param {TreeNode} node @param {Hands} hands @returns {Mounted} */
-export function choice(node, hands) {
+/** @param {TreeNode} _node @param {Hands} hands @returns {Mounted} */
+export function choice(_node, hands) {
   count += 1;
   const id = `choice-${count}`;
   let path = '';

@@ -47,13 +47,15 @@ function piece(node, hands) {
   const set = (/** @type {string} */ name, /** @type {string} */ value) => {
     if (name === 'text') element.textContent = value;
     else if (name === 'anchor') attribute(element, 'text-anchor', value);
+    else if (name === 'go') target = value;
     else if (name === 'name') attribute(element, 'aria-label', value);
-    else if (name === 'go') {
-      target = value;
+    else attribute(element, name, value);
+    if (name === 'go' || name === 'name') {
       // A label that leads somewhere says so by itself; a shape needs its name.
-      attribute(element, 'role', value && (label || node.p.name ? 'button' : ''));
-      attribute(element, 'tabindex', value && (label || node.p.name ? '0' : ''));
-    } else attribute(element, name, value);
+      const named = label || element.hasAttribute('aria-label');
+      attribute(element, 'role', target && named ? 'button' : element.hasAttribute('aria-label') ? 'img' : '');
+      attribute(element, 'tabindex', target && named ? '0' : '');
+    }
   };
   return { element, set };
 }

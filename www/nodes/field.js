@@ -8,8 +8,8 @@ import { attribute, make, words } from '../dom.js';
 const ORIGINS = ['measured', 'drawing', 'assumed'];
 let count = 0;
 
-/** @param {TreeNode} node @param {Hands} hands @returns {Mounted} */
-export function field(node, hands) {
+/** @param {TreeNode} _node @param {Hands} hands @returns {Mounted} */
+export function field(_node, hands) {
   count += 1;
   const id = `field-${count}`;
   let path = '';
@@ -64,6 +64,9 @@ export function field(node, hands) {
     text: (value) => {
       // What is being written is never written over.
       if (document.activeElement !== input) input.value = value;
+    },
+    ghost: (value) => {
+      input.placeholder = value;
     },
     mode: (value) => {
       input.dataset.mode = value;

@@ -7,7 +7,8 @@ import { make, words } from '../dom.js';
 
 /** @param {TreeNode} node @returns {Mounted} */
 export function heading(node) {
-  const element = make(node.p.level === '3' ? 'h3' : 'h2');
+  const levels = { 1: 'h1', 2: 'h2', 3: 'h3' };
+  const element = make(/** @type {'h1' | 'h2' | 'h3'} */ (levels[/** @type {'1' | '2' | '3'} */ (node.p.level)] ?? 'h2'));
   return { element, set: (name, value) => name === 'text' && (element.textContent = value) };
 }
 

@@ -5,8 +5,8 @@ import { attribute, make, words } from '../dom.js';
 /** @typedef {import('../surface.js').Mounted} Mounted */
 /** @typedef {import('../border.js').TreeNode} TreeNode */
 
-/** @param {TreeNode} node @param {Hands} hands @returns {Mounted} */
-export function table(node, hands) {
+/** @param {TreeNode} _node @param {Hands} hands @returns {Mounted} */
+export function table(_node, hands) {
   const caption = make('caption', { hidden: '' });
   const inside = make('table', { class: 'table' }, caption);
   const element = make('div', { class: 'scroller', tabindex: '0', role: 'group' }, inside);
@@ -24,8 +24,9 @@ function tableRow(node, hands) {
   const head = node.p.head === '1';
   const target = node.p.go;
   let first = true;
-  const child = () => {
-    const cell = tableCell(head, first ? target : undefined, hands);
+  const child = (/** @type {TreeNode} */ cellNode) => {
+    // A head without words is no head.
+    const cell = tableCell(head && Boolean(cellNode.p.text), first ? target : undefined, hands);
     first = false;
     return cell;
   };

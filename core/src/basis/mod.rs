@@ -13,9 +13,8 @@ use crate::load::axle_train::AxleTrain;
 use crate::load::dead::DeadLoad;
 use crate::load::lane::Lane;
 use crate::problem::Problem;
-use crate::quantity::{Area, Force, Length, Modulus, Moment, Quantity, Stress};
+use crate::quantity::{Force, Length, Modulus, Moment, Quantity, Stress};
 use crate::section::plate::Left;
-use crate::share::LaneShare;
 use crate::worksheet::{LineNo, Recorder, Val};
 
 /// What a rule set is called and from which editions it is taken.
@@ -59,6 +58,15 @@ pub struct LoadFactors {
     pub dw: Val<f64>,
     /// On live load.
     pub live: Val<f64>,
+}
+
+/// Share of a lane that a girder takes.
+#[derive(Clone, Debug, PartialEq)]
+pub struct LaneShare {
+    /// The share that rules, with multiple presence in it.
+    pub share: Val<f64>,
+    /// What deserves a second look.
+    pub notes: Vec<Problem>,
 }
 
 /// A moment, a force or a stress on its line of the worksheet.
@@ -140,6 +148,12 @@ impl<'a> At<'a> {
         Self { bridge, line, x, left: bridge.left_at(line, x) }
     }
 
+    /// Whether both places are on one line, with the same plates left.
+    #[must_use]
+    pub fn same_plates(&self, other: &Self) -> bool {
+        self.line == other.line && self.left == other.left
+    }
+
     /// The girder, if the member is of steel.
     #[must_use]
     pub fn steel(&self) -> &'a SteelGirder {
@@ -173,8 +187,12 @@ pub trait Basis {
     /// Limit states that the rule set looks at for an action.
     fn states(&self, action: Action) -> &'static [LimitState];
 
-    /// Dead load on a girder line.
-    fn dead<R: Recorder>(&self, rec: &mut R, bridge: &Bridge, line: usize, area: Val<Area>) -> DeadLoad;
+    /// Dead load on a girder line. Its own weight is that of the sound section: what rust has taken
+    /// off one end does not make the span lighter.
+    ///
+    /// # Errors
+    /// When the section cannot be worked out.
+    fn dead<R: Recorder>(&self, rec: &mut R, bridge: &Bridge, line: usize) -> Result<DeadLoad, Problem>;
 
     /// Share of live load for an action (moment, or shear and reactions).
     ///
@@ -237,6 +255,13 @@ pub trait Basis {
     /// What the outcomes of the legal vehicles ask for: one entry a legal case.
     fn posting(&self, bridge: &Bridge, ruling: &[Ruling<'_>]) -> Posting;
 
-    /// The safe load of one vehicle, for the sheet.
-    fn safe_load<R: Recorder>(&self, rec: &mut R, weight: Force, outcome: &Outcome);
+    /// The safe load of one vehicle if an outcome of a limit state rules it, for the sheet.
+    fn safe_load<R: Recorder>(
+        &self,
+        rec: &mut R,
+        bridge: &Bridge,
+        case: &Case,
+        state: LimitState,
+        outcome: &Outcome,
+    );
 }

@@ -5,7 +5,7 @@ mod posting;
 
 use crate::problem::Problem;
 
-pub use posting::{Class, Limit, Posting, SafeLoad, Sign};
+pub use posting::{Class, ClassLimit, Limit, Posting, SafeLoad, Sign};
 
 /// What a girder is asked for.
 #[derive(Clone, Copy, Debug, PartialEq, Eq, PartialOrd, Ord)]

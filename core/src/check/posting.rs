@@ -30,13 +30,12 @@ pub struct Posting {
 pub enum Sign {
     /// Every legal vehicle passes.
     None,
-    /// Limits for single units and combinations, in the sign's own unit, rounded down; `None`
-    /// where that class needs no limit.
+    /// Limits for single units and combinations.
     Limit {
         /// For single-unit trucks.
-        single_unit: Option<u32>,
+        single_unit: ClassLimit,
         /// For combinations.
-        combination: Option<u32>,
+        combination: ClassLimit,
         /// The unit of both figures.
         unit: WeightUnit,
     },
@@ -44,6 +43,29 @@ pub enum Sign {
     Close,
     /// No answer: something that has to be rated got no number.
     NotKnown,
+}
+
+/// What a sign says of a class of vehicles.
+#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+pub enum ClassLimit {
+    /// All of the class pass.
+    None,
+    /// Up to this weight, in the sign's own unit, rounded down.
+    Weight(u32),
+    /// None of the class may cross.
+    NotAllowed,
+}
+
+impl ClassLimit {
+    /// The stricter of two.
+    #[must_use]
+    pub fn stricter(self, other: Self) -> Self {
+        match (self, other) {
+            (Self::NotAllowed, _) | (_, Self::NotAllowed) => Self::NotAllowed,
+            (Self::Weight(a), Self::Weight(b)) => Self::Weight(a.min(b)),
+            (Self::None, limit) | (limit, Self::None) => limit,
+        }
+    }
 }
 
 /// The safe load of one vehicle type.

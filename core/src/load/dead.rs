@@ -1,243 +1,263 @@
-//! Dead load take-off: what each girder line carries, by stage, in rows that can be checked by hand.
+//! Dead load of a girder line, taken off from measured layers, strips and the girder itself.
 //!
-//! DC1 came onto the bare girder (its own weight, the slab by tributary width, the haunch), DC2 after
-//! the slab had hardened (parapets, rails), DW is the wearing surface and utilities. Later loads are
-//! shared by tributary width or equally, as the rule set says.
+//! Kept apart by stage: DC1, components that the bare girder carries (its own steel, the slab, the
+//! haunch, strips that came with the wet slab); DC2, components that came later; DW, wearing surface
+//! and utilities. Every row is a line that can be checked by hand. Loads are uniform along the span.
 
+use super::across::Across;
 use crate::bridge::{Bridge, Layer, Stage, Strip, StripSide};
 use crate::clause;
-use crate::quantity::{Area, Length, LineLoad, UnitWeight};
-use crate::units::mark::{Ft, Ft2, In2, Inch, KipPerFt, One, Pcf};
+use crate::quantity::{Area, Force, Length, LineLoad, Moment, UnitWeight};
+use crate::units::mark::{Ft, In2, Inch, Kcf, Kip, KipFt, KipPerFt, One};
 use crate::units::{Entered, Provenance};
 use crate::worksheet::{Recorder, Val};
 
-/// How loads added after the slab had hardened are shared out.
+/// How a load that came after the slab is shared out.
 #[derive(Clone, Copy, Debug, PartialEq, Eq)]
 pub enum Sharing {
-    /// Equally among the girders.
-    Equal,
-    /// By the width of deck that a girder carries; what stands at an edge goes to the outer girder.
+    /// By the width of deck that a girder carries; a strip along an edge goes to the outer girder.
     Tributary,
+    /// Equally among all girders.
+    Equal,
 }
 
-/// Dead load of one girder line.
+/// The choices of a rule set for the take-off.
+#[derive(Clone, Debug, PartialEq)]
+pub struct TakeOff {
+    /// Unit weight of structural steel.
+    pub steel: Entered<UnitWeight>,
+    /// Sharing of strips that came after the slab had hardened.
+    pub later: Sharing,
+    /// Sharing of wearing surface and utilities.
+    pub surface: Sharing,
+    /// Clause that allows the sharing, for the worksheet.
+    pub cite: &'static str,
+}
+
+/// Uniform dead load of one girder line by stage.
 #[derive(Clone, Copy, Debug, PartialEq)]
 pub struct DeadLoad {
     /// Components on the bare girder.
     pub dc1: Val<LineLoad>,
-    /// Components added later.
+    /// Components that came after the slab had hardened.
     pub dc2: Val<LineLoad>,
-    /// Wearing surface and utilities.
+    /// Wearing surface and utilities together.
     pub dw: Val<LineLoad>,
-    /// Whether all of the wearing surface was measured on this bridge, and nothing else is in it.
-    pub dw_measured: bool,
+    /// The part of `dw` that is a wearing surface whose thickness was measured on this bridge.
+    pub dw_measured: Val<LineLoad>,
+    /// The part of `dw` that is not: other layers, utilities, planned overlays.
+    pub dw_other: Val<LineLoad>,
+    /// Readings of thickness behind `dw_measured`: the fewest that a measured layer has; 0 without one.
+    pub readings: usize,
 }
 
-clause! {
-    /// Weight of a girder from the area of its section; steel weighs 490 pcf.
-    pub fn girder_weight(A: Area [In2], gamma_s: UnitWeight [Pcf]) -> w: LineLoad [KipPerFt]
-    { A / 144.0 * gamma_s / 1000.0 }
-    cite "geometry" what "weight of the girder"
-}
-
-clause! {
-    /// Weight of a layer of uniform thickness on a width of deck.
-    pub fn layer_weight(t: Length [Inch], b: Length [Ft], gamma: UnitWeight [Pcf]) -> w: LineLoad [KipPerFt]
-    { t / 12.0 * b * gamma / 1000.0 }
-    cite "geometry" what "weight of the layer on the girder"
-}
-
-clause! {
-    /// Equal part of a layer over the whole roadway.
-    pub fn layer_weight_shared(
-        t: Length [Inch], b: Length [Ft], gamma: UnitWeight [Pcf], N_b: f64 [One],
-    ) -> w: LineLoad [KipPerFt]
-    { t / 12.0 * b * gamma / 1000.0 / N_b }
-    cite "geometry; shared equally" what "weight of the layer on the girder"
-}
-
-clause! {
-    /// Equal part of what stands along the deck.
-    pub fn strip_weight_shared(n: f64 [One], w_1: LineLoad [KipPerFt], N_b: f64 [One])
-        -> w: LineLoad [KipPerFt]
-    { n * w_1 / N_b }
-    cite "shared equally" what "weight of the strip on the girder"
-}
-
-clause! {
-    /// Concrete in the haunch over one girder.
-    pub fn haunch_area(t_h: Length [Inch], b_h: Length [Inch]) -> A_h: Area [Ft2]
-    { t_h * b_h / 144.0 }
-    cite "geometry" what "area of the haunch"
-}
-
-clause! {
-    /// Weight of the haunch over one girder.
-    pub fn haunch_weight(A_h: Area [Ft2], gamma: UnitWeight [Pcf]) -> w: LineLoad [KipPerFt]
-    { A_h * gamma / 1000.0 }
-    cite "geometry" what "weight of the haunch"
-}
-
-/// Unit weight of steel: 490 pcf.
-fn steel<R: Recorder>(rec: &mut R) -> Val<UnitWeight> {
-    rec.look_up(
-        "gamma_s",
-        "unit weight of steel",
-        UnitWeight::from_pcf(490.0),
-        Pcf,
-        "AASHTO LRFD 9th ed. table 3.5.1-1 (0.490 kcf)",
-        || "steel".to_owned(),
+/// Unit weight of structural steel, 0.490 kcf (AASHTO LRFD table 3.5.1-1, from memory, 9th edition).
+#[must_use]
+pub fn steel_weight() -> Entered<UnitWeight> {
+    Entered::assumed(
+        "",
+        UnitWeight::from_kcf(0.490),
+        "structural steel 0.490 kcf (AASHTO LRFD table 3.5.1-1, from memory, 9th edition)",
     )
 }
 
-/// Dead load of a girder line whose sound section has the area given.
+/// Takes off the dead load of a girder line.
+///
+/// `area` is the area of the girder's steel section. Slab and haunch go by tributary width; layers lie
+/// on the roadway alone, so a girder outside the curb carries less of them.
 pub fn take_off<R: Recorder>(
     rec: &mut R,
     bridge: &Bridge,
+    across: &Across,
     line: usize,
     area: Val<Area>,
-    sharing: Sharing,
+    rules: &TakeOff,
 ) -> DeadLoad {
-    rec.heading("Dead load taken off the measured layers");
-    let dc1 = bare(rec, bridge, line, area);
-    let dc2 = strips(rec, bridge, line, Stage::Later, sharing);
-    let dc2 = total(rec, "w_DC2", "components added later", &dc2);
-    let mut surface = Vec::new();
-    for layer in &bridge.deck.layers {
-        surface.push((layer.name.as_str(), of_layer(rec, bridge, line, layer, sharing)));
-    }
-    let utilities = strips(rec, bridge, line, Stage::Surface, sharing);
-    let measured = utilities.is_empty()
-        && bridge.deck.layers.iter().all(|l| l.thickness.provenance == Provenance::Measured);
-    surface.extend(utilities);
-    let dw = total(rec, "w_DW", "wearing surface and utilities", &surface);
-    DeadLoad { dc1, dc2, dw, dw_measured: measured && !bridge.deck.layers.is_empty() }
+    let strip = across.strip(rec, line);
+    let b = width(rec, strip.1, strip.0);
+    let on = Placed { bridge, across, line, strip, rules };
+    let dc1 = bare(rec, &on, b, area);
+    let dc2 = later(rec, &on);
+    let (dw_measured, dw_other, readings) = surface(rec, &on);
+    let dw = rec.sum(
+        "DW",
+        "wearing surface and utilities",
+        &[("wearing surface, measured", dw_measured), ("not measured, and utilities", dw_other)],
+        KipPerFt,
+    );
+    DeadLoad { dc1, dc2, dw, dw_measured, dw_other, readings }
 }
 
-fn total<R: Recorder>(
-    rec: &mut R,
-    symbol: &str,
-    what: &str,
-    parts: &[(&str, Val<LineLoad>)],
-) -> Val<LineLoad> {
-    rec.sum(symbol, what, parts, KipPerFt)
+/// What the parts of a take-off look at.
+struct Placed<'a> {
+    bridge: &'a Bridge,
+    across: &'a Across,
+    line: usize,
+    strip: (Val<Length>, Val<Length>),
+    rules: &'a TakeOff,
 }
 
-/// What came onto the bare girder.
-fn bare<R: Recorder>(rec: &mut R, bridge: &Bridge, line: usize, area: Val<Area>) -> Val<LineLoad> {
-    let deck = &bridge.deck;
-    let gamma_s = steel(rec);
-    let girder = girder_weight(rec, area, gamma_s);
-    let b = tributary(rec, bridge, line);
-    let gamma = rec.given("gamma", "unit weight of reinforced concrete", &deck.concrete.unit_weight, Pcf);
+fn bare<R: Recorder>(rec: &mut R, on: &Placed<'_>, b: Val<Length>, area: Val<Area>) -> Val<LineLoad> {
+    let deck = &on.bridge.deck;
+    let steel = rec.given("gamma_s", "unit weight of steel", &on.rules.steel, Kcf);
+    let own = girder_weight(rec, area, steel);
+    let gamma = rec.given("gamma", "unit weight of reinforced concrete", &deck.concrete.unit_weight, Kcf);
     let t = rec.given("t", "thickness of the slab", &deck.slab, Inch);
     let slab = layer_weight(rec, t, b, gamma);
-    let t_h = rec.given("t_h", "thickness of the haunch", &deck.haunch, Inch);
-    let b_h = rec.given("b_h", "width of the haunch", &deck.haunch_width, Inch);
-    let a_h = haunch_area(rec, t_h, b_h);
-    let haunch = haunch_weight(rec, a_h, gamma);
-    let mut parts = vec![("girder", girder), ("slab", slab), ("haunch", haunch)];
-    parts.extend(strips(rec, bridge, line, Stage::Bare, Sharing::Tributary));
-    total(rec, "w_DC1", "components on the bare girder", &parts)
+    let t_h = rec.given("t", "thickness of the haunch", &deck.haunch, Inch);
+    let b_h = rec.given("b", "width of the haunch", &deck.haunch_width, Ft);
+    let haunch = layer_weight(rec, t_h, b_h, gamma);
+    let mut rows = vec![("girder", own), ("slab", slab), ("haunch", haunch)];
+    for strip in deck.strips.iter().filter(|strip| strip.stage == Stage::Bare) {
+        rows.push((strip.name.as_str(), strip_share(rec, on, strip, Sharing::Tributary)));
+    }
+    rec.sum("DC1", "components on the bare girder", &rows, KipPerFt)
 }
 
-/// Width of deck that a line carries, on its line of the sheet.
-fn tributary<R: Recorder>(rec: &mut R, bridge: &Bridge, line: usize) -> Val<Length> {
-    let width = bridge.tributary(line);
-    rec.found("b", "width of deck that the girder carries", width, Ft, 0.0, || {
-        if bridge.is_exterior(line) {
-            "half the spacing at the inner side and the overhang".to_owned()
-        } else {
-            "half the spacing at either side".to_owned()
+fn later<R: Recorder>(rec: &mut R, on: &Placed<'_>) -> Val<LineLoad> {
+    let mut rows = Vec::new();
+    for strip in on.bridge.deck.strips.iter().filter(|strip| strip.stage == Stage::Later) {
+        rows.push((strip.name.as_str(), strip_share(rec, on, strip, on.rules.later)));
+    }
+    rec.sum("DC2", "components that came after the slab had hardened", &rows, KipPerFt)
+}
+
+fn surface<R: Recorder>(rec: &mut R, on: &Placed<'_>) -> (Val<LineLoad>, Val<LineLoad>, usize) {
+    let deck = &on.bridge.deck;
+    let mut measured = Vec::new();
+    let mut other = Vec::new();
+    let mut readings = usize::MAX;
+    if !deck.layers.is_empty() {
+        let b = match on.rules.surface {
+            Sharing::Tributary => {
+                let (y_l, y_r) = on.strip;
+                roadway_over(rec, y_l, y_r, on.across.curb, on.across.roadway)
+            }
+            Sharing::Equal => {
+                let n_b = girders(rec, on);
+                rec.remark(|| {
+                    format!("The wearing surface is shared equally among the girders: {}", on.rules.cite)
+                });
+                roadway_each(rec, on.across.roadway, n_b)
+            }
+        };
+        for layer in &deck.layers {
+            let t = rec.given("t", &format!("thickness of {}", layer.name), &layer.thickness, Inch);
+            let gamma =
+                rec.given("gamma", &format!("unit weight of {}", layer.name), &layer.unit_weight, Kcf);
+            let row = (layer.name.as_str(), layer_weight(rec, t, b, gamma));
+            if is_measured(layer) {
+                readings = readings.min(layer.thickness.readings.len());
+                measured.push(row);
+            } else {
+                other.push(row);
+            }
         }
+    }
+    for strip in deck.strips.iter().filter(|strip| strip.stage == Stage::Surface) {
+        other.push((strip.name.as_str(), strip_share(rec, on, strip, on.rules.surface)));
+    }
+    let dw_measured =
+        rec.sum("DW_m", "wearing surface, thickness measured on this bridge", &measured, KipPerFt);
+    let dw_other = rec.sum("DW_o", "wearing surface not measured, and utilities", &other, KipPerFt);
+    (dw_measured, dw_other, if measured.is_empty() { 0 } else { readings })
+}
+
+/// Whether a layer's thickness was measured on this bridge: read, not taken from a drawing.
+fn is_measured(layer: &Layer) -> bool {
+    layer.thickness.provenance == Provenance::Measured && !layer.thickness.readings.is_empty()
+}
+
+/// What a girder line carries of a strip along the deck.
+fn strip_share<R: Recorder>(rec: &mut R, on: &Placed<'_>, strip: &Strip, sharing: Sharing) -> Val<LineLoad> {
+    let w_s = rec.given("w_s", &format!("weight of one {}", strip.name), &strip.weight, KipPerFt);
+    let last = on.across.girders.len() - 1;
+    let both = strip.side == StripSide::Both;
+    let along = |rec: &mut R, count: usize| {
+        rec.found("n_s", "strips that count", count as f64, One, 0.0, || match strip.side {
+            StripSide::Left => "one along the left edge".to_owned(),
+            StripSide::Right => "one along the right edge".to_owned(),
+            StripSide::Both => "one along either edge".to_owned(),
+        })
+    };
+    match sharing {
+        Sharing::Equal => {
+            let n_s = along(rec, if both { 2 } else { 1 });
+            let n_b = girders(rec, on);
+            rec.remark(|| format!("{} is shared equally among the girders: {}", strip.name, on.rules.cite));
+            equal_share(rec, w_s, n_s, n_b)
+        }
+        Sharing::Tributary => {
+            let left = on.line == 0 && (both || strip.side == StripSide::Left);
+            let right = on.line == last && (both || strip.side == StripSide::Right);
+            let n_s = along(rec, usize::from(left) + usize::from(right));
+            edge_share(rec, w_s, n_s)
+        }
+    }
+}
+
+fn girders<R: Recorder>(rec: &mut R, on: &Placed<'_>) -> Val<f64> {
+    rec.found("N_b", "number of girder lines", on.across.girders.len() as f64, One, 0.0, || {
+        "counted".to_owned()
     })
 }
 
-/// A layer lies on the roadway only: to an outer girder goes the part of its width between the curbs.
-fn of_layer<R: Recorder>(
-    rec: &mut R,
-    bridge: &Bridge,
-    line: usize,
-    layer: &Layer,
-    sharing: Sharing,
-) -> Val<LineLoad> {
-    let t = rec.given("t", &layer.name, &layer.thickness, Inch);
-    let gamma = rec.given("gamma", "its unit weight", &layer.unit_weight, Pcf);
-    match sharing {
-        Sharing::Equal => {
-            let b = rec.given("b", "roadway between curbs", &bridge.deck.roadway, Ft);
-            let n = count(rec, bridge);
-            layer_weight_shared(rec, t, b, gamma, n)
-        }
-        Sharing::Tributary => {
-            let width = on_roadway(bridge, line);
-            let b = rec.found("b", "roadway over the width that the girder carries", width, Ft, 0.0, || {
-                "its tributary width between the curbs".to_owned()
-            });
-            layer_weight(rec, t, b, gamma)
-        }
-    }
+clause! {
+    /// Width of deck that a girder carries.
+    fn width(y_r: Length [Ft], y_l: Length [Ft]) -> b: Length [Ft] { y_r - y_l }
+    cite "tributary width" what "width of deck that the girder carries"
 }
 
-/// The part of a line's tributary width that lies between the curbs.
-#[must_use]
-pub fn on_roadway(bridge: &Bridge, line: usize) -> Length {
-    let y = bridge.lines[line].y;
-    let left = if line == 0 { Length::ZERO } else { (y + bridge.lines[line - 1].y) / 2.0 };
-    let right = if line + 1 == bridge.lines.len() {
-        bridge.deck.width.value
-    } else {
-        (y + bridge.lines[line + 1].y) / 2.0
-    };
-    let (from, to) = (bridge.deck.left_curb, bridge.deck.left_curb + bridge.deck.roadway.value);
-    (right.min(to) - left.max(from)).max(Length::ZERO)
+clause! {
+    /// Width of roadway within the strip that a girder carries; nothing where no roadway lies over it.
+    fn roadway_over(y_l: Length [Ft], y_r: Length [Ft], c: Length [Ft], w: Length [Ft]) -> b: Length [Ft]
+    { max(0.0, min(y_r, c + w) - max(y_l, c)) }
+    cite "tributary width" what "width of roadway over the strip that the girder carries"
 }
 
-fn count<R: Recorder>(rec: &mut R, bridge: &Bridge) -> Val<f64> {
-    let lines = u32::try_from(bridge.lines.len()).unwrap_or(u32::MAX);
-    let entry = Entered::measured("girders", f64::from(lines));
-    rec.given("N_b", "number of girders", &entry, One)
+clause! {
+    /// Width of roadway for each girder where it is shared equally.
+    fn roadway_each(w: Length [Ft], N_b: f64 [One]) -> b: Length [Ft] { w / N_b }
+    cite "equal shares" what "width of roadway for each girder"
 }
 
-/// Strips of a stage on a line: an equal part, or the whole of what stands at its edge.
-fn strips<'a, R: Recorder>(
-    rec: &mut R,
-    bridge: &'a Bridge,
-    line: usize,
-    stage: Stage,
-    sharing: Sharing,
-) -> Vec<(&'a str, Val<LineLoad>)> {
-    let mut parts = Vec::new();
-    for strip in bridge.deck.strips.iter().filter(|s| s.stage == stage) {
-        let w_1 = rec.given("w_1", &strip.name, &strip.weight, KipPerFt);
-        let part = match sharing {
-            Sharing::Equal => {
-                let n = rec.look_up("n", "how many of them", how_many(strip), One, "entry", || {
-                    "one, or one along either edge".to_owned()
-                });
-                let n_b = count(rec, bridge);
-                strip_weight_shared(rec, n, w_1, n_b)
-            }
-            Sharing::Tributary if at_its_edge(bridge, line, strip) => w_1,
-            Sharing::Tributary => continue,
-        };
-        parts.push((strip.name.as_str(), part));
-    }
-    parts
+clause! {
+    /// Weight of a layer on a length.
+    fn layer_weight(t: Length [Inch], b: Length [Ft], gamma: UnitWeight [Kcf]) -> w: LineLoad [KipPerFt]
+    { t / 12.0 * b * gamma }
+    cite "thickness x width x unit weight" what "weight of the layer on a length"
 }
 
-const fn how_many(strip: &Strip) -> f64 {
-    match strip.side {
-        StripSide::Left | StripSide::Right => 1.0,
-        StripSide::Both => 2.0,
-    }
+clause! {
+    /// Weight of a girder on a length.
+    fn girder_weight(A: Area [In2], gamma_s: UnitWeight [Kcf]) -> w: LineLoad [KipPerFt]
+    { A / 144.0 * gamma_s }
+    cite "area x unit weight" what "weight of the girder on a length"
 }
 
-fn at_its_edge(bridge: &Bridge, line: usize, strip: &Strip) -> bool {
-    let (first, last) = (line == 0, line + 1 == bridge.lines.len());
-    match strip.side {
-        StripSide::Left => first,
-        StripSide::Right => last,
-        StripSide::Both => first || last,
-    }
+clause! {
+    /// Equal share of strips.
+    fn equal_share(w_s: LineLoad [KipPerFt], n_s: f64 [One], N_b: f64 [One]) -> w: LineLoad [KipPerFt]
+    { w_s * n_s / N_b }
+    cite "equal shares" what "what each girder carries of it"
+}
+
+clause! {
+    /// Strips along the edge beside a girder.
+    fn edge_share(w_s: LineLoad [KipPerFt], n_s: f64 [One]) -> w: LineLoad [KipPerFt] { w_s * n_s }
+    cite "tributary width" what "what the girder carries of it"
+}
+
+clause! {
+    /// Moment at a station of a simple span under a uniform load.
+    pub fn moment(w: LineLoad [KipPerFt], x: Length [Ft], L: Length [Ft]) -> M: Moment [KipFt]
+    { w * x * (L - x) / 2.0 }
+    cite "statics, simple span" what "moment of the uniform load"
+}
+
+clause! {
+    /// Shear at a station of a simple span under a uniform load; positive near the first support.
+    pub fn shear(w: LineLoad [KipPerFt], x: Length [Ft], L: Length [Ft]) -> V: Force [Kip]
+    { w * (L / 2.0 - x) }
+    cite "statics, simple span" what "shear of the uniform load"
 }

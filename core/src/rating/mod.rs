@@ -14,7 +14,7 @@ pub mod result;
 mod sheet;
 mod stations;
 
-pub use crate::check::{Class, Limit, Posting, SafeLoad, Sign};
+pub use crate::check::{Class, ClassLimit, Limit, Posting, SafeLoad, Sign};
 pub use rater::Rater;
 pub use result::{
     Capacity, Check, DeadEffects, Factors, Figures, Key, LineSummary, LiveLoad, Rating, VehicleResult,

@@ -5,13 +5,12 @@ use super::effects::{CaseEffects, Effects, Peak, effects};
 use super::govern;
 use super::line::{Prepared, prepare};
 use super::result::{Capacity, Check, Key, LineSummary, LiveLoad, Rating};
-use crate::basis::{Amount, At, Basis, Case, FaceModuli, LoadFactors, Resistance};
+use crate::basis::{Amount, At, Basis, Case, FaceModuli, LaneShare, LoadFactors, Resistance};
 use crate::bridge::{Bridge, Composite};
 use crate::check::{Action, LimitState};
 use crate::moving::Workspace;
 use crate::problem::Problem;
 use crate::quantity::{Force, Length, Moment, Quantity};
-use crate::section::plate::Left;
 use crate::worksheet::{Silent, Val};
 
 /// Rates bridges, and remembers the last effects: they depend on the span, the stations and the
@@ -51,7 +50,8 @@ impl Rater {
             self.last = Some((given, fresh));
         }
         let Some((given, effects)) = &self.last else { return Err(Vec::new()) };
-        let mut work = Work { bridge, basis, span, cases: &given.cases, effects, checks: Vec::new() };
+        let mut work =
+            Work { bridge, basis, span, cases: &given.cases, effects, checks: Vec::new(), notes: Vec::new() };
         let lines = (0..bridge.lines.len())
             .map(|line| work.line(line))
             .collect::<Result<_, _>>()
@@ -67,7 +67,7 @@ impl Rater {
             by_vehicle: Vec::new(),
             posting: govern::unknown_posting(),
             not_rated: Vec::new(),
-            notes: basis.notes(bridge),
+            notes: [basis.notes(bridge), work.notes].concat(),
         };
         govern::govern(&mut rating, bridge, basis, &given.cases);
         Ok(rating)
@@ -93,6 +93,10 @@ pub fn only_span(bridge: &Bridge) -> Result<Length, Problem> {
     }
 }
 
+fn share_of(share: &Result<LaneShare, Problem>) -> Result<f64, Problem> {
+    share.as_ref().map(|s| s.share.q).map_err(Clone::clone)
+}
+
 fn live_load(case: &Case) -> LiveLoad {
     LiveLoad {
         id: case.id.clone(),
@@ -110,13 +114,18 @@ struct Work<'a, B> {
     cases: &'a [Case],
     effects: &'a Effects,
     checks: Vec<Check>,
+    /// What the shares say of themselves, each once.
+    notes: Vec<Problem>,
 }
+
+/// Capacities by what they are asked for.
+type Capacities = Vec<(Action, LimitState, Result<Resistance, Problem>)>;
 
 /// What a place carries, worked once for all vehicles.
 struct Place {
     x: Length,
     index: usize,
-    capacities: Vec<(Action, LimitState, Result<Resistance, Problem>)>,
+    capacities: Capacities,
     moduli: Result<[Option<FaceModuli>; 2], Problem>,
 }
 
@@ -134,6 +143,13 @@ impl<B: Basis> Work<'_, B> {
                 }
             }
         }
+        for share in [&prepared.share_moment, &prepared.share_shear].into_iter().flatten() {
+            for note in &share.notes {
+                if !self.notes.contains(note) {
+                    self.notes.push(note.clone());
+                }
+            }
+        }
         let governing =
             govern::worst_legal(&self.checks[first..], self.cases, self.basis.service_posts(self.bridge));
         Ok(LineSummary {
@@ -141,8 +157,8 @@ impl<B: Basis> Work<'_, B> {
             dc1: prepared.dead.dc1.q,
             dc2: prepared.dead.dc2.q,
             dw: prepared.dead.dw.q,
-            share_moment: prepared.share_moment.map(|s| s.share.q),
-            share_shear: prepared.share_shear.map(|s| s.share.q),
+            share_moment: share_of(&prepared.share_moment),
+            share_shear: share_of(&prepared.share_shear),
             capacities: places.iter().flat_map(|p| capacities(line, p)).collect(),
             governing: governing.map(|i| first + i),
         })
@@ -151,16 +167,16 @@ impl<B: Basis> Work<'_, B> {
     /// Capacities at every station. The same plates have the same capacity, so each set of plates is
     /// worked once; where the slab works along, first yield hangs on the dead load at the place too.
     fn places(&self, line: usize, prepared: &Prepared) -> Vec<Place> {
-        let mut known: Vec<(Left, Vec<(Action, LimitState, Result<Resistance, Problem>)>, _)> = Vec::new();
+        let mut known: Vec<(At<'_>, Capacities, _)> = Vec::new();
         let mut places = Vec::new();
         let last = self.effects.stations.len() - 1;
         for (index, x) in self.effects.stations.iter().enumerate() {
             let at = At::new(self.bridge, line, *x);
             let by_plates = at.steel().composite != Composite::Proved;
-            let found = known.iter().position(|(left, ..)| by_plates && *left == at.left);
+            let found = known.iter().position(|(seen, ..)| by_plates && seen.same_plates(&at));
             let found = found.unwrap_or_else(|| {
                 let worked = self.worked(&at, prepared, &EVERYWHERE);
-                known.push((at.left, worked, self.basis.moduli(&mut Silent, &at)));
+                known.push((at, worked, self.basis.moduli(&mut Silent, &at)));
                 known.len() - 1
             });
             let (_, capacities, moduli) = &known[found];
@@ -173,12 +189,7 @@ impl<B: Basis> Work<'_, B> {
         places
     }
 
-    fn worked(
-        &self,
-        at: &At<'_>,
-        prepared: &Prepared,
-        actions: &[Action],
-    ) -> Vec<(Action, LimitState, Result<Resistance, Problem>)> {
+    fn worked(&self, at: &At<'_>, prepared: &Prepared, actions: &[Action]) -> Capacities {
         let mut all = Vec::new();
         for action in actions {
             for state in self.basis.states(*action) {

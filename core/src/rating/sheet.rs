@@ -2,12 +2,11 @@
 
 use super::combine::{self, Parts};
 use super::effects::{Peak, line_of, policy};
-use super::line::dead;
 use super::rater::only_span;
 use super::result::{Check, Key};
 use crate::basis::{Amount, At, Basis, Case};
 use crate::bridge::Bridge;
-use crate::check::{Action, Level, Outcome};
+use crate::check::{Action, Level};
 use crate::clause;
 use crate::moving::{Direction, Governing, extremes, lane_extremes};
 use crate::problem::Problem;
@@ -67,7 +66,7 @@ fn check<B: Basis>(
     let x = sheet.found("x", "station, from the near bearing", key.x, Ft, 0.0, || {
         "chosen by the search for what governs".to_owned()
     });
-    let dead = dead(sheet, bridge, basis, key.line)?;
+    let dead = basis.dead(sheet, bridge, key.line)?;
     sheet.heading("Live load on a whole lane");
     let (peak, lane_effect, against_dead) = live(sheet, case, key, span, length, x)?;
     let share = basis.share(sheet, bridge, key.line, key.action)?.share;
@@ -98,16 +97,10 @@ fn check<B: Basis>(
     };
     let check = combine::check(sheet, basis, *key, &parts);
     if case.level == Level::Legal && check.outcome.rank().is_some() {
-        posting(sheet, basis, case, &check.outcome);
+        sheet.heading("What follows for this vehicle, if this check rules it");
+        basis.safe_load(sheet, bridge, case, key.state, &check.outcome);
     }
     Ok(check)
-}
-
-fn posting<B: Basis>(sheet: &mut Sheet, basis: &B, case: &Case, outcome: &Outcome) {
-    if let Some(weight) = case.weight {
-        sheet.heading("What follows for this vehicle, if this check rules it");
-        basis.safe_load(sheet, weight, outcome);
-    }
 }
 
 /// The live load effect of a whole lane with the vehicle where it governs, axle by axle.

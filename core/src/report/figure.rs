@@ -79,8 +79,8 @@ pub fn with_unit(value: f64, name: &str) -> String {
     }
 }
 
-/// A rating factor with two decimals, rounded down: what is printed is never more than what was
-/// found, and a factor below 1 is never printed as 1.
+/// A rating factor with two decimals, to the nearest, but never up to a threshold that decides: see
+/// [`crate::units::format::factor`].
 #[must_use]
 pub fn factor(value: f64) -> String {
     if !value.is_finite() || value < 0.0 {
@@ -89,12 +89,7 @@ pub fn factor(value: f64) -> String {
     if value >= 100.0 {
         return "over 99".to_owned();
     }
-    // A hundredth that `f64` holds from just below (0.29) is that hundredth.
-    let mut hundredths = libm::floor(value * 100.0 + 1e-9);
-    if value < 1.0 {
-        hundredths = hundredths.min(99.0);
-    }
-    format!("{:.2}", hundredths / 100.0)
+    crate::units::format::factor(value)
 }
 
 /// A number with at most `decimals` decimals, without zeros behind.
@@ -136,13 +131,13 @@ mod tests {
     }
 
     #[test]
-    fn a_factor_is_rounded_down_and_never_reaches_one_from_below() {
+    fn a_factor_is_rounded_but_never_reaches_one_from_below() {
         for (value, text) in [
-            (0.819_9, "0.81"),
+            (0.814_9, "0.81"),
             (0.29, "0.29"),
             (0.999_999_999_999, "0.99"),
             (1.0, "1.00"),
-            (1.209_999, "1.20"),
+            (1.209_999, "1.21"),
             (0.0, "0.00"),
             (123.4, "over 99"),
             (f64::INFINITY, "no figure"),

@@ -4,7 +4,7 @@
 //! with a limit for each kind of vehicle; R11-2 for a closed bridge.
 
 use super::show::signed;
-use crate::check::Sign;
+use crate::check::{ClassLimit, Sign};
 use crate::units::WeightUnit;
 
 /// What stands on a sign.
@@ -21,14 +21,24 @@ pub struct Face {
 pub fn face(sign: Sign) -> Option<Face> {
     let title = ("WEIGHT LIMIT", String::new());
     match sign {
-        Sign::None | Sign::NotKnown | Sign::Limit { single_unit: None, combination: None, .. } => None,
+        Sign::None
+        | Sign::NotKnown
+        | Sign::Limit { single_unit: ClassLimit::None, combination: ClassLimit::None, .. } => None,
         Sign::Close => Some(Face {
             rows: vec![("BRIDGE", String::new()), ("CLOSED", String::new())],
             spoken: "sign: bridge closed".to_owned(),
         }),
-        Sign::Limit { single_unit: Some(single), combination: Some(combination), unit }
-            if single == combination =>
-        {
+        Sign::Limit { single_unit: ClassLimit::NotAllowed, combination: ClassLimit::NotAllowed, .. } => {
+            Some(Face {
+                rows: vec![("NO", String::new()), ("TRUCKS", String::new())],
+                spoken: "sign: no trucks".to_owned(),
+            })
+        }
+        Sign::Limit {
+            single_unit: ClassLimit::Weight(single),
+            combination: ClassLimit::Weight(combination),
+            unit,
+        } if single == combination => {
             let rows = match unit {
                 WeightUnit::ShortTons => vec![title, ("", single.to_string()), ("TONS", String::new())],
                 WeightUnit::Tonnes => vec![title, ("", format!("{single} t"))],
@@ -39,14 +49,18 @@ pub fn face(sign: Sign) -> Option<Face> {
             let mut rows = vec![title];
             let mut parts = Vec::new();
             for (name, limit) in [("SINGLE UNIT", single_unit), ("COMBINATION", combination)] {
-                if let Some(limit) = limit {
-                    let text = match unit {
-                        WeightUnit::ShortTons => format!("{limit} T"),
-                        WeightUnit::Tonnes => format!("{limit} t"),
-                    };
-                    rows.push((name, text));
-                    parts.push(format!("{} {}", name.to_lowercase(), signed(limit, unit)));
-                }
+                let (text, spoken) = match (limit, unit) {
+                    (ClassLimit::None, _) => continue,
+                    (ClassLimit::NotAllowed, _) => ("NONE".to_owned(), "not allowed".to_owned()),
+                    (ClassLimit::Weight(limit), WeightUnit::ShortTons) => {
+                        (format!("{limit} T"), signed(limit, unit))
+                    }
+                    (ClassLimit::Weight(limit), WeightUnit::Tonnes) => {
+                        (format!("{limit} t"), signed(limit, unit))
+                    }
+                };
+                rows.push((name, text));
+                parts.push(format!("{} {spoken}", name.to_lowercase()));
             }
             Some(Face { rows, spoken: format!("sign: weight limit, {}", parts.join(", ")) })
         }
@@ -55,6 +69,7 @@ pub fn face(sign: Sign) -> Option<Face> {
 
 #[cfg(test)]
 mod tests {
+    use super::ClassLimit::{NotAllowed, Weight};
     use super::*;
 
     fn rows(sign: Sign) -> Vec<String> {
@@ -65,21 +80,33 @@ mod tests {
     #[test]
     fn the_face_says_what_the_posting_says() {
         let limit = |single_unit, combination, unit| Sign::Limit { single_unit, combination, unit };
-        assert_eq!(rows(limit(Some(25), None, WeightUnit::Tonnes)), ["WEIGHT LIMIT", "SINGLE UNIT 25 t"]);
         assert_eq!(
-            rows(limit(Some(21), Some(34), WeightUnit::ShortTons)),
+            rows(limit(Weight(25), ClassLimit::None, WeightUnit::Tonnes)),
+            ["WEIGHT LIMIT", "SINGLE UNIT 25 t"]
+        );
+        assert_eq!(
+            rows(limit(Weight(21), Weight(34), WeightUnit::ShortTons)),
             ["WEIGHT LIMIT", "SINGLE UNIT 21 T", "COMBINATION 34 T"]
         );
-        assert_eq!(rows(limit(Some(12), Some(12), WeightUnit::ShortTons)), ["WEIGHT LIMIT", "12", "TONS"]);
+        assert_eq!(
+            rows(limit(Weight(12), Weight(12), WeightUnit::ShortTons)),
+            ["WEIGHT LIMIT", "12", "TONS"]
+        );
+        assert_eq!(
+            rows(limit(NotAllowed, Weight(34), WeightUnit::ShortTons)),
+            ["WEIGHT LIMIT", "SINGLE UNIT NONE", "COMBINATION 34 T"]
+        );
+        assert_eq!(rows(limit(NotAllowed, NotAllowed, WeightUnit::Tonnes)), ["NO", "TRUCKS"]);
         assert_eq!(rows(Sign::Close), ["BRIDGE", "CLOSED"]);
         assert_eq!(face(Sign::None), None);
         assert_eq!(face(Sign::NotKnown), None);
-        assert_eq!(face(limit(None, None, WeightUnit::Tonnes)), None);
+        assert_eq!(face(limit(ClassLimit::None, ClassLimit::None, WeightUnit::Tonnes)), None);
     }
 
     #[test]
     fn it_can_be_spoken() {
-        let sign = Sign::Limit { single_unit: Some(21), combination: Some(34), unit: WeightUnit::ShortTons };
+        let sign =
+            Sign::Limit { single_unit: Weight(21), combination: Weight(34), unit: WeightUnit::ShortTons };
         assert_eq!(
             face(sign).expect("a sign").spoken,
             "sign: weight limit, single unit 21 tons, combination 34 tons"

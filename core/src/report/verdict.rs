@@ -4,7 +4,7 @@ use super::figure::factor;
 use super::names;
 use super::show::{limit as limit_of, signed, station};
 use super::sign::{Face, face};
-use crate::check::{Action, Limit, Outcome, Sign};
+use crate::check::{Action, ClassLimit, Limit, Outcome, Sign};
 use crate::problem::{Problem, Severity};
 use crate::quantity::Length;
 use crate::rating::{Check, Rating};
@@ -163,17 +163,22 @@ fn headline(rating: &Rating) -> (String, Tone) {
         Sign::None => (NO_POSTING.to_owned(), Tone::Good),
         Sign::Limit { single_unit, combination, unit } => {
             let text = match (single_unit, combination) {
-                (Some(single), Some(combination)) if single == combination => {
-                    format!("Post for all trucks: {}.", signed(single, unit))
+                (ClassLimit::None, ClassLimit::None) => NO_POSTING.to_owned(),
+                (single, ClassLimit::None) => {
+                    format!("Post for single-unit trucks: {}.", of_class(single, unit))
                 }
-                (Some(single), Some(combination)) => format!(
+                (ClassLimit::None, combination) => {
+                    format!("Post for combinations: {}.", of_class(combination, unit))
+                }
+                (ClassLimit::NotAllowed, ClassLimit::NotAllowed) => "Post: no trucks.".to_owned(),
+                (single, combination) if single == combination => {
+                    format!("Post for all trucks: {}.", of_class(single, unit))
+                }
+                (single, combination) => format!(
                     "Post: single-unit trucks {}, combinations {}.",
-                    signed(single, unit),
-                    signed(combination, unit)
+                    of_class(single, unit),
+                    of_class(combination, unit)
                 ),
-                (Some(single), None) => format!("Post for single-unit trucks: {}.", signed(single, unit)),
-                (None, Some(combination)) => format!("Post for combinations: {}.", signed(combination, unit)),
-                (None, None) => NO_POSTING.to_owned(),
             };
             (text, Tone::Caution)
         }
@@ -189,6 +194,15 @@ fn headline(rating: &Rating) -> (String, Tone) {
         Sign::NotKnown => {
             ("No answer on posting: something that has to be rated got no number.".to_owned(), Tone::Caution)
         }
+    }
+}
+
+/// What a sign says of a class, in words.
+fn of_class(limit: ClassLimit, unit: WeightUnit) -> String {
+    match limit {
+        ClassLimit::None => "no limit".to_owned(),
+        ClassLimit::Weight(limit) => signed(limit, unit),
+        ClassLimit::NotAllowed => "not allowed".to_owned(),
     }
 }
 
@@ -221,8 +235,18 @@ fn reasons(rating: &Rating, governing: Option<&Check>, system: System) -> Vec<St
             outcome(&next.outcome)
         ));
     }
+    // The same reason at several places is said once.
+    let mut said: Vec<(&str, usize)> = Vec::new();
     for problem in &rating.not_rated {
-        reasons.push(sentence("Not rated: ", &problem.message));
+        match said.iter_mut().find(|(message, _)| *message == problem.message) {
+            Some((_, places)) => *places += 1,
+            None => said.push((&problem.message, 1)),
+        }
+    }
+    for (message, places) in said {
+        let at =
+            if places > 1 { format!("Not rated at {places} places: ") } else { "Not rated: ".to_owned() };
+        reasons.push(sentence(&at, message));
     }
     reasons
 }

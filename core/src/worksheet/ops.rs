@@ -39,3 +39,9 @@ pub fn max(a: f64, b: f64) -> f64 {
 pub fn tan_deg(x: f64) -> f64 {
     libm::tan(x.to_radians())
 }
+
+/// The greatest whole number that is not above `x`.
+#[must_use]
+pub fn floor(x: f64) -> f64 {
+    libm::floor(x)
+}

@@ -1,7 +1,7 @@
 //! Capacity of a steel girder at a place, with its factors.
 
 use super::Settings;
-use super::factors::{OnResistance, on_resistance, overridden};
+use super::factors::{OnResistance, dead_factors, on_resistance, overridden};
 use crate::basis::{Amount, At, FaceModuli, Resistance};
 use crate::bridge::{Composite as Connectors, Straightness, WebEnds};
 use crate::check::Action;
@@ -14,7 +14,6 @@ use crate::clauses::lrfd::steel::flange::Hold;
 use crate::clauses::lrfd::steel::noncomposite::{self, FlexureCase};
 use crate::clauses::lrfd::steel::shear::{self, Panel, ShearCase};
 use crate::clauses::lrfd::steel::{material, phi, service};
-use crate::clauses::mbe::factors::{component, surface};
 use crate::clauses::mbe::rating::{force_capacity, moment_capacity, service_capacity};
 use crate::load::dead::DeadLoad;
 use crate::problem::Problem;
@@ -77,7 +76,7 @@ pub fn capacity<R: Recorder>(
                 bare_moment(rec, settings, at, &section, f_y)?
             };
             let phi = phi::flexure(rec);
-            let factors = on(rec, settings, at, false);
+            let factors = on(rec, settings, at, action)?;
             let phi = overridden(rec, at.bridge, "phi", phi);
             let factored = moment_capacity(rec, factors.both, phi, nominal);
             Ok(resistance(Amount::Moment(factored), phi, &factors))
@@ -94,7 +93,7 @@ pub fn capacity<R: Recorder>(
             };
             let nominal = shear::nominal_shear(rec, &case)?;
             let phi = phi::shear(rec);
-            let factors = on(rec, settings, at, true);
+            let factors = on(rec, settings, at, action)?;
             let phi = overridden(rec, at.bridge, "phi", phi);
             let factored = force_capacity(rec, factors.both, phi, nominal);
             Ok(resistance(Amount::Force(factored), phi, &factors))
@@ -118,9 +117,14 @@ pub fn capacity<R: Recorder>(
     }
 }
 
-fn on<R: Recorder>(rec: &mut R, settings: &Settings, at: &At<'_>, shear: bool) -> OnResistance {
+fn on<R: Recorder>(
+    rec: &mut R,
+    settings: &Settings,
+    at: &At<'_>,
+    action: Action,
+) -> Result<OnResistance, Problem> {
     let measured = at.bridge.loss_measured_at(at.line, at.x);
-    on_resistance(rec, at.bridge, settings.condition_rises, shear, measured)
+    on_resistance(rec, at.bridge, action, settings.condition_rises && measured)
 }
 
 fn resistance(factored: Amount, phi: Val<f64>, factors: &OnResistance) -> Resistance {
@@ -191,8 +195,7 @@ fn composite_moment<R: Recorder>(
     let span = &at.bridge.spans[0].length;
     let length = rec.given("L", "span", span, Ft);
     let x = Val { q: at.x, line: length.line };
-    let gamma_dc = component(rec, LimitState::StrengthI);
-    let gamma_dw = surface(rec, LimitState::StrengthI, dead.dw_measured);
+    let (gamma_dc, gamma_dw) = dead_factors(rec, at.bridge, LimitState::StrengthI, dead);
     let m_d1 = staged_moment(rec, gamma_dc, dead.dc1, x, length);
     let m_dc2 = staged_moment(rec, gamma_dc, dead.dc2, x, length);
     let m_dw = staged_moment(rec, gamma_dw, dead.dw, x, length);
@@ -249,7 +252,7 @@ fn bearing_capacity<R: Recorder>(
     let r_c = factored_force(rec, phi_w, crippling);
     let lesser = lesser_force(rec, r_y, r_c);
     let phi = if r_y.q <= r_c.q { phi_b } else { phi_w };
-    let factors = on(rec, settings, at, true);
+    let factors = on(rec, settings, at, Action::Bearing)?;
     let one = rec.look_up("phi", "resistance factor", 1.0, One, "already in R_r", String::new);
     let factored = force_capacity(rec, factors.both, one, lesser);
     Ok(resistance(Amount::Force(factored), phi, &factors))

@@ -6,25 +6,27 @@
 
 mod capacity;
 mod factors;
+mod posting;
 
-use super::{About, Amount, At, Basis, Case, FaceModuli, LoadFactors, Resistance, Ruling};
+use super::{About, Amount, At, Basis, Case, FaceModuli, LaneShare, LoadFactors, Resistance, Ruling};
 use crate::bridge::{Bridge, MemberKind};
 use crate::check::{Action, Class, Level, LimitState, Outcome, Posting};
-use crate::clauses::lrfd::girder_share::{Across, Effect, Stiffness, girder_share};
+use crate::clauses::lrfd::distribution::{
+    Bands, Loading, Method, Policy, RigidRule, SkewShear, Stiffness, governing_share,
+};
 use crate::clauses::lrfd::steel::lateral::Torsion;
 use crate::clauses::lrfd::steel::material;
 use crate::clauses::lrfd::{hl93, lanes as lrfd_lanes};
 use crate::clauses::mbe;
-use crate::clauses::mbe::legal_vehicles::LEGAL;
-use crate::clauses::mbe::posting::Rated;
-use crate::load::dead::{DeadLoad, Sharing, take_off};
-use crate::load::{AxleTrain, Spacing};
+use crate::clauses::mbe::factors::Crossing;
+use crate::clauses::mbe::legal_vehicles::LEGAL_TRUCKS;
+use crate::load::dead::{DeadLoad, Sharing, TakeOff, steel_weight, take_off};
+use crate::load::{Across, AxleTrain, Spacing};
 use crate::material::Defaults;
 use crate::problem::Problem;
-use crate::quantity::{Area, Force, Length, Stress};
+use crate::quantity::{Length, Stress};
 use crate::section::effective::{Effective, Remains};
-use crate::share::LaneShare;
-use crate::units::mark::{Inch, Ksi};
+use crate::units::mark::{Ft, Inch, Ksi};
 use crate::worksheet::{Recorder, Silent, Val};
 
 pub use factors::{NAMES, factor_label};
@@ -44,6 +46,9 @@ pub struct Settings {
     /// How loads added after the slab had hardened are shared out: equally by default (LRFD
     /// 4.6.2.2.1).
     pub sharing: Sharing,
+    /// Which girders get the increase of shear for skew (LRFD 4.6.2.2.3c): all of them by default, the
+    /// safe side of exterior and first interior girders.
+    pub skew_shear: SkewShear,
 }
 
 impl Default for Settings {
@@ -53,6 +58,22 @@ impl Default for Settings {
             condition_rises: false,
             torsion: Torsion::Neglected,
             sharing: Sharing::Equal,
+            skew_shear: SkewShear::All,
+        }
+    }
+}
+
+impl Settings {
+    /// How live load is shared out on a roadway of full width.
+    const fn share(&self) -> Policy {
+        Policy {
+            loading: Loading::Governing,
+            method: Method::Formula,
+            bands: Bands::DesignLanes,
+            rigid: RigidRule::WithDiaphragms,
+            // A reduction, so not taken.
+            skew_moment: false,
+            skew_shear: self.skew_shear,
         }
     }
 }
@@ -66,11 +87,11 @@ pub struct MbeA {
 
 impl Defaults for MbeA {
     fn yield_strength(&self, year: Option<i32>) -> Option<(Stress, &'static str)> {
-        year.map(mbe::factors::yield_by_year)
+        mbe::materials::steel_yield(year)
     }
 
     fn concrete_strength(&self, year: Option<i32>) -> Option<(Stress, &'static str)> {
-        year.map(mbe::factors::concrete_by_year)
+        mbe::materials::concrete_strength(year)
     }
 }
 
@@ -81,7 +102,7 @@ fn own_train(own: &crate::bridge::OwnVehicle) -> Result<AxleTrain, Vec<Problem>>
         own.name.clone(),
         own.axles.clone(),
         own.spacings.iter().map(|s| Spacing::Fixed(*s)).collect(),
-        lrfd_lanes::GAUGE,
+        lrfd_lanes::gauge(&mut Silent).q,
         "entered by the user",
     )
 }
@@ -100,20 +121,18 @@ impl Basis for MbeA {
         for (level, id, name) in
             [(Level::Inventory, "hl93-inventory", "HL-93"), (Level::Operating, "hl93-operating", "HL-93")]
         {
-            let trains: Vec<AxleTrain> =
-                [hl93::truck(), hl93::tandem()].into_iter().filter_map(Result::ok).collect();
             cases.push(Case {
                 id: id.to_owned(),
                 name: name.to_owned(),
                 level,
                 class: Class::Design,
                 weight: None,
-                trains,
-                lane: Some(hl93::LANE),
+                trains: vec![hl93::truck(), hl93::tandem()],
+                lane: Some(hl93::lane()),
                 relieving_counts: false,
             });
         }
-        let legal = LEGAL.iter().filter_map(|row| row.train().ok().map(|train| (row.class, train)));
+        let legal = LEGAL_TRUCKS.iter().map(|row| (row.class, row.train()));
         let own = bridge.vehicles.iter().filter_map(|v| own_train(v).ok().map(|train| (Class::Own, train)));
         for (class, train) in legal.chain(own) {
             cases.push(Case {
@@ -150,8 +169,18 @@ impl Basis for MbeA {
         }
     }
 
-    fn dead<R: Recorder>(&self, rec: &mut R, bridge: &Bridge, line: usize, area: Val<Area>) -> DeadLoad {
-        take_off(rec, bridge, line, area, self.settings.sharing)
+    fn dead<R: Recorder>(&self, rec: &mut R, bridge: &Bridge, line: usize) -> Result<DeadLoad, Problem> {
+        let MemberKind::Steel(girder) = &bridge.member(line).kind;
+        let section = Effective::at(rec, &girder.section, &Remains::default())?;
+        rec.heading("Dead load taken off the measured layers");
+        let across = Across::of(rec, bridge);
+        let rules = TakeOff {
+            steel: steel_weight(),
+            later: self.settings.sharing,
+            surface: self.settings.sharing,
+            cite: "AASHTO LRFD 9th ed. 4.6.2.2.1",
+        };
+        Ok(take_off(rec, bridge, &across, line, section.left.area, &rules))
     }
 
     fn share<R: Recorder>(
@@ -166,7 +195,7 @@ impl Basis for MbeA {
         let strength = &bridge.deck.concrete.strength;
         let f_c = rec.given("f'c", "strength of the deck concrete", strength, Ksi);
         let n = material::modular_ratio(rec, f_c, &strength.path)?;
-        let y_top = rec.found(
+        let y_t = rec.found(
             "y_t",
             "centroid to the top of the girder",
             section.depth.q - section.y.q,
@@ -174,32 +203,34 @@ impl Basis for MbeA {
             0.0,
             || "depth less the height of the centroid".to_owned(),
         );
-        let stiffness = Stiffness { n, inertia: section.left.inertia, area: section.left.area, y_top };
-        let deck = &bridge.deck;
-        let (count, lane) = mbe::lanes::lanes(deck.roadway.value, lrfd_lanes::LANE);
-        let across = Across {
-            bridge,
-            line,
-            road: lrfd_lanes::roadway(deck.left_curb, deck.roadway.value, lane),
-            lanes: count,
-            diaphragms: girder.bracing.spacing.is_some(),
+        let stiffness = Stiffness { n, i: section.left.inertia, a: section.left.area, y_t };
+        let across = Across::of(rec, bridge);
+        let narrow = mbe::lanes::narrow(rec, across.roadway);
+        let bands = match narrow {
+            Some(_) => Bands::Passing(mbe::lanes::between_passing(rec)),
+            None => Bands::DesignLanes,
         };
-        let (effect, name) = match action {
-            Action::Moment | Action::Stress => (Effect::Moment, "g_M"),
-            Action::Shear | Action::Bearing => (Effect::Shear, "g_V"),
+        let lanes = narrow.unwrap_or_else(|| lrfd_lanes::design_lanes(rec, across.roadway));
+        let policy = Policy { bands, ..self.settings.share() };
+        let share = governing_share(rec, bridge, &across, line, action, &stiffness, &lanes, &policy)?;
+        let name = match action {
+            Action::Moment | Action::Stress => "g_M",
+            Action::Shear | Action::Bearing => "g_V",
         };
-        let share = girder_share(rec, &across, effect, &stiffness)?;
-        Ok(LaneShare { share: factors::overridden(rec, bridge, name, share.share), lanes: share.lanes })
+        Ok(LaneShare { share: factors::overridden(rec, bridge, name, share.g), notes: share.notes })
     }
 
     fn dynamic<R: Recorder>(&self, rec: &mut R, bridge: &Bridge, case: &Case) -> Val<f64> {
-        let value = match case.level {
-            Level::Inventory | Level::Operating => mbe::factors::dynamic_design(rec),
-            Level::Legal => {
-                let span = bridge.spans.first().map_or(Length::ZERO, |s| s.length.value);
-                mbe::factors::dynamic_legal(rec, bridge.traffic.riding, span)
-            }
+        let crossing = match case.level {
+            Level::Inventory | Level::Operating => Crossing::Design,
+            Level::Legal => Crossing::LegalOrPermit,
         };
+        let span = match bridge.spans.first() {
+            Some(span) => rec.given("L", "span", &span.length, Ft),
+            // The full allowance holds for the shortest span.
+            None => Val::bare(Length::ZERO),
+        };
+        let value = mbe::factors::dynamic(rec, crossing, span, bridge.traffic.riding);
         factors::overridden(rec, bridge, "IM", value)
     }
 
@@ -263,22 +294,17 @@ impl Basis for MbeA {
     }
 
     fn posting(&self, bridge: &Bridge, ruling: &[Ruling<'_>]) -> Posting {
-        let rated: Vec<Rated> = ruling.iter().map(rated).collect();
-        mbe::posting::posting(&mut Silent, &rated, bridge.posting.sign)
+        posting::posting(bridge.posting.sign, ruling)
     }
 
-    fn safe_load<R: Recorder>(&self, rec: &mut R, weight: Force, outcome: &Outcome) {
-        mbe::posting::limit(rec, weight, outcome);
-    }
-}
-
-fn rated(ruling: &Ruling<'_>) -> Rated {
-    Rated {
-        load: ruling.load,
-        class: ruling.case.class,
-        weight: ruling.case.weight.unwrap_or(Force::ZERO),
-        outcome: ruling.outcome.clone(),
-        strength: ruling.strength.clone(),
-        routine: ["type3", "type3s2", "type3-3"].contains(&ruling.case.id.as_str()),
+    fn safe_load<R: Recorder>(
+        &self,
+        rec: &mut R,
+        bridge: &Bridge,
+        case: &Case,
+        state: LimitState,
+        outcome: &Outcome,
+    ) {
+        posting::safe_load(rec, bridge.posting.sign, case, state, outcome);
     }
 }

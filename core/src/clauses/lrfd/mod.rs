@@ -2,7 +2,6 @@
 
 pub mod distribution;
 pub mod effective_width;
-pub mod girder_share;
 pub mod hl93;
 pub mod lanes;
 pub mod steel;

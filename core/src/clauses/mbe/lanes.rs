@@ -1,51 +1,46 @@
-//! How many lanes an existing roadway holds, whatever is painted on it.
+//! Traffic lanes of narrow roadways (MBE 6A.2.3.2): what can pass, not what is painted.
 
 use crate::quantity::Length;
+use crate::share::Lanes;
+use crate::units::mark::Ft;
+use crate::worksheet::{Recorder, Val};
+use crate::{clause, condition};
 
-/// Lanes on a roadway, and the width of each (MBE 6A.2.3.2 with LRFD 3.6.1.1.1): under 18 ft one lane;
-/// from 18 to 24 ft two of half the width; from 24 ft on as many as 12 ft go into it.
+/// Traffic lanes of a clear roadway narrower than 20 ft; none for a wider one, which has the design lanes
+/// of the design specifications.
 ///
-/// Widths within a tenth of a millimetre of a limit are taken as on it.
-#[must_use]
-pub fn lanes(roadway: Length, full: Length) -> (u32, Length) {
-    let width = roadway + Length::from_mm(0.1);
-    if width < Length::from_ft(18.0) {
-        (1, full.min(roadway))
-    } else if width < full * 2.0 {
-        (2, roadway / 2.0)
+/// Under 18 ft one lane; from 18 to 20 ft two, each half the width.
+pub fn narrow<R: Recorder>(rec: &mut R, w: Val<Length>) -> Option<Lanes> {
+    if wide(rec, w) {
+        None
+    } else if two_lanes(rec, w) {
+        Some(Lanes { count: 2, width: half_width(rec, w).q })
     } else {
-        let mut count = 2;
-        while full * f64::from(count + 1) <= width {
-            count += 1;
-        }
-        (count, full)
+        Some(Lanes { count: 1, width: w.q })
     }
 }
 
-#[cfg(test)]
-mod tests {
-    use super::*;
+/// Least distance between the nearest wheels of passing vehicles, 4.0 ft (6A.2.3.2).
+pub fn between_passing<R: Recorder>(rec: &mut R) -> Val<Length> {
+    let cite = "AASHTO MBE 3rd ed. 6A.2.3.2 (from memory)";
+    rec.look_up("between", "wheel lines of passing vehicles", Length::from_ft(4.0), Ft, cite, || {
+        "least distance between adjacent wheel lines".to_owned()
+    })
+}
 
-    /// MBE 6A.2.3.2 and LRFD 3.6.1.1.1, from memory: limits at 18, 20 and 24 ft, then one lane every
-    /// 12 ft.
-    #[test]
-    fn lanes_by_width() {
-        let full = Length::from_ft(12.0);
-        for (ft, count, lane) in [
-            (10.0, 1, 10.0),
-            (17.9, 1, 12.0),
-            (18.0, 2, 9.0),
-            (20.0, 2, 10.0),
-            (23.9, 2, 11.95),
-            (24.0, 2, 12.0),
-            (28.0, 2, 12.0),
-            (35.9, 2, 12.0),
-            (36.0, 3, 12.0),
-            (48.0, 4, 12.0),
-        ] {
-            let (n, w) = lanes(Length::from_ft(ft), full);
-            assert_eq!(n, count, "{ft} ft");
-            assert!((w.in_ft() - lane).abs() < 1e-9, "{ft} ft: {}", w.in_ft());
-        }
-    }
+condition! {
+    fn wide(w: Length [Ft]) { w >= 20.0 }
+    cite "AASHTO MBE 3rd ed. 6A.2.3.2 (from memory)"
+    yes "20 ft or more: lanes of the design specifications" no "narrower than 20 ft"
+}
+
+condition! {
+    fn two_lanes(w: Length [Ft]) { w >= 18.0 }
+    cite "AASHTO MBE 3rd ed. 6A.2.3.2 (from memory)"
+    yes "18 to 20 ft: two lanes, each half the width" no "narrower than 18 ft: one lane"
+}
+
+clause! {
+    fn half_width(w: Length [Ft]) -> w_l: Length [Ft] { w / 2.0 }
+    cite "AASHTO MBE 3rd ed. 6A.2.3.2 (from memory)" what "width of a traffic lane"
 }

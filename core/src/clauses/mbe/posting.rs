@@ -1,121 +1,206 @@
-//! Posting by MBE 6A.8; from memory of the 3rd edition (2018).
+//! Posting of legal loads (MBE 6A.8). From memory, 3rd edition.
+//!
+//! Not for emergency vehicles, whose signs have axle, tandem and gross limits of their own, and not for
+//! other rule sets, which have posting equations of their own.
 
-use crate::check::{Class, Limit, Outcome, Posting, SafeLoad, Sign};
-use crate::clause;
+use crate::check::Outcome;
+use crate::problem::{Problem, finite};
 use crate::quantity::Force;
 use crate::units::WeightUnit;
-use crate::units::mark::{One, ShortTon};
-use crate::worksheet::{Recorder, Val};
+use crate::units::mark::{One, ShortTon, Tonne};
+use crate::worksheet::Recorder;
+use crate::worksheet::ops::floor;
+use crate::{clause, condition};
 
-/// Below this factor a vehicle type is not allowed at all.
-pub const LEAST_FACTOR: f64 = 0.3;
-
-/// A bridge that cannot carry a gross weight of three short tons must be closed (MBE 6A.8.1).
-pub const LEAST_LOAD: Force = Force::from_short_ton(3.0);
-
-clause! {
-    /// Safe posting load of a vehicle type, for 0.3 <= RF < 1. W 25 tons and RF 0.65: 12.5 tons.
-    pub fn safe_load(W: Force [ShortTon], RF: f64 [One]) -> W_safe: Force [ShortTon]
-    { W / 0.7 * (RF - 0.3) }
-    cite "MBE 3rd ed. 6A.8.3 (6A.8.3-1)" what "safe posting load"
-}
-
-/// One legal vehicle with what came out for it.
-#[derive(Clone, Debug)]
-pub struct Rated {
-    /// Index into the loads of the rating.
-    pub load: usize,
-    /// How signs see it.
-    pub class: Class,
-    /// Gross weight.
+/// A vehicle with the outcome that governs its posting.
+#[derive(Clone, Copy, Debug, PartialEq)]
+pub struct Rated<'a> {
+    /// Id of the vehicle.
+    pub id: &'a str,
+    /// Its gross weight; 80 kip for the lane-type load.
     pub weight: Force,
-    /// Ruling outcome.
-    pub outcome: Outcome,
-    /// Ruling outcome of strength alone: only that may close a bridge.
-    pub strength: Outcome,
-    /// Whether it is one of the three routine legal trucks.
-    pub routine: bool,
+    /// Its governing outcome.
+    pub outcome: &'a Outcome,
+    /// Whether it is one of the three AASHTO legal trucks, at which closure looks.
+    pub standard: bool,
 }
 
-/// What follows for one vehicle type.
-pub fn limit<R: Recorder>(rec: &mut R, weight: Force, outcome: &Outcome) -> Limit {
-    match outcome {
-        Outcome::Factor(f) if *f >= 1.0 => {
-            rec.remark(|| "The factor is 1.0 or more: it passes at its full weight.".to_owned());
-            Limit::Full
-        }
-        Outcome::Factor(f) if *f >= LEAST_FACTOR => {
-            Limit::Weight(safe_load(rec, Val::bare(weight), Val::bare(*f)).q)
-        }
-        Outcome::Factor(_) | Outcome::CarriesNoLiveLoad => {
-            rec.remark(|| {
-                "The factor is below 0.3: this vehicle type is not allowed (MBE 6A.8.3).".to_owned()
-            });
-            Limit::NotAllowed
-        }
-        Outcome::NotLoaded => Limit::Full,
-        Outcome::NotRated(_) => Limit::NotKnown,
+/// What a sign says of one type of vehicle.
+#[derive(Clone, Debug, PartialEq)]
+pub enum Sign {
+    /// No limit is needed: the rating factor is 1.0 or more, or the vehicle has no effect.
+    NotNeeded,
+    /// A limit.
+    Limit {
+        /// Safe posting load.
+        safe: Force,
+        /// What stands on the sign, rounded down in its unit.
+        shown: u32,
+        /// Unit of the sign.
+        unit: WeightUnit,
+    },
+    /// The type is not allowed on the bridge.
+    NotAllowed(NotAllowed),
+    /// Its rating is missing, so nothing can be said; the problem of the rating.
+    NotKnown(Problem),
+}
+
+/// Why a type of vehicle is not allowed.
+#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+pub enum NotAllowed {
+    /// Rating factor below 0.3 (6A.8.3).
+    Below03,
+    /// Dead load leaves nothing for live load.
+    NoLiveLoad,
+    /// Its safe posting load, as the sign would show it, is below three tons (6A.8.1).
+    UnderThreeTons,
+}
+
+/// Whether a bridge may stay open.
+#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+pub enum Closure {
+    /// Nothing here asks for it.
+    Open,
+    /// To be closed: none of the standard legal trucks has a safe posting load of three tons (6A.8.1).
+    UnderThreeTons,
+    /// To be closed: every standard legal truck rates below 0.3, for which 6A.8.3 says to consider
+    /// closure, and so none has a safe posting load of three tons.
+    AllBelow03,
+    /// Not known: a standard legal truck has no rating, and the others do not carry three tons.
+    NotKnown,
+}
+
+impl Closure {
+    /// Whether the bridge is to be closed.
+    #[must_use]
+    pub fn closes(self) -> bool {
+        matches!(self, Self::UnderThreeTons | Self::AllBelow03)
     }
 }
 
-/// The posting of a bridge.
+/// Posting of a bridge.
+#[derive(Clone, Debug, PartialEq)]
+pub struct Posting {
+    /// Each vehicle with its sign, in the order given.
+    pub signs: Vec<(String, Sign)>,
+    /// Whether it may stay open.
+    pub closure: Closure,
+}
+
+/// The least limit that a sign may show, three tons of its unit: two tonnes would be less than the three
+/// short tons of 6A.8.1.
+#[must_use]
+pub const fn least_limit(unit: WeightUnit) -> (Force, u32) {
+    match unit {
+        WeightUnit::ShortTons => (Force::from_short_ton(3.0), 3),
+        WeightUnit::Tonnes => (Force::from_tonne(3.0), 3),
+    }
+}
+
+/// Posting from the rated legal vehicles.
 ///
-/// The sign names one limit for single units and one for combinations, each the least of its types,
-/// rounded down in the unit of the sign. A class of which one type is not allowed at all has no safe
-/// weight that a sign could name for it, so its limit is that of the least allowed type, but not more
-/// than the least load. The bridge is to be closed when strength gives less than 0.3 for all three
-/// routine trucks, or when a limit falls below three short tons by strength; service alone never
-/// closes it.
-pub fn posting<R: Recorder>(rec: &mut R, rated: &[Rated], unit: WeightUnit) -> Posting {
-    let safe: Vec<SafeLoad> = rated
-        .iter()
-        .map(|r| SafeLoad { load: r.load, factor: r.outcome.rank(), limit: limit(rec, r.weight, &r.outcome) })
-        .collect();
-    let sign = if rated.is_empty() || safe.iter().any(|s| s.limit == Limit::NotKnown) {
-        Sign::NotKnown
-    } else if must_close(rated) {
-        Sign::Close
+/// Strength always decides; whether an outcome of Service II takes part is for the rule set to settle
+/// before it hands in `outcome`.
+pub fn post<R: Recorder>(rec: &mut R, vehicles: &[Rated<'_>], unit: WeightUnit) -> Posting {
+    let signs: Vec<Sign> = vehicles.iter().map(|vehicle| sign(rec, vehicle, unit)).collect();
+    let standard = || vehicles.iter().zip(&signs).filter(|(vehicle, _)| vehicle.standard);
+    let carries = |sign: &Sign| matches!(sign, Sign::NotNeeded | Sign::Limit { .. });
+    let below = |sign: &Sign| matches!(sign, Sign::NotAllowed(NotAllowed::Below03 | NotAllowed::NoLiveLoad));
+    let closure = if standard().any(|(_, sign)| carries(sign)) {
+        Closure::Open
+    } else if standard().count() == 0 || standard().any(|(_, sign)| matches!(sign, Sign::NotKnown(_))) {
+        Closure::NotKnown
+    } else if standard().all(|(_, sign)| below(sign)) {
+        Closure::AllBelow03
     } else {
-        let of = |class| least(rated, &safe, class).map(|w| floor_in(unit, w));
-        match (of(Class::SingleUnit), of(Class::Combination)) {
-            (None, None) => Sign::None,
-            (single_unit, combination) => Sign::Limit { single_unit, combination, unit },
+        Closure::UnderThreeTons
+    };
+    Posting { signs: vehicles.iter().map(|vehicle| vehicle.id.to_owned()).zip(signs).collect(), closure }
+}
+
+fn sign<R: Recorder>(rec: &mut R, vehicle: &Rated<'_>, unit: WeightUnit) -> Sign {
+    let factor = match vehicle.outcome {
+        Outcome::Factor(factor) => match finite(*factor, "posting", "the rating factor") {
+            Ok(factor) => factor,
+            Err(problem) => return Sign::NotKnown(problem),
+        },
+        Outcome::CarriesNoLiveLoad => return Sign::NotAllowed(NotAllowed::NoLiveLoad),
+        Outcome::NotLoaded => return Sign::NotNeeded,
+        Outcome::NotRated(problem) => return Sign::NotKnown(problem.clone()),
+    };
+    let rf = rec.found("RF", &format!("rating factor of {}", vehicle.id), factor, One, 0.0, || {
+        "the outcome that governs its posting".to_owned()
+    });
+    if carried(rec, rf) {
+        return Sign::NotNeeded;
+    }
+    if barred(rec, rf) {
+        return Sign::NotAllowed(NotAllowed::Below03);
+    }
+    let what = format!("gross weight of {}", vehicle.id);
+    let weight = |rec: &mut R| {
+        let how = || "sum of its axles".to_owned();
+        match unit {
+            WeightUnit::ShortTons => rec.found("W", &what, vehicle.weight, ShortTon, 0.0, how),
+            WeightUnit::Tonnes => rec.found("W", &what, vehicle.weight, Tonne, 0.0, how),
         }
     };
-    Posting { sign, safe }
-}
-
-fn must_close(rated: &[Rated]) -> bool {
-    let low = |r: &Rated| r.strength.rank().is_some_and(|f| f < LEAST_FACTOR);
-    let mut routine = rated.iter().filter(|r| r.routine).peekable();
-    let all_routine_low = routine.peek().is_some() && routine.all(low);
-    let below_three = rated.iter().any(|r| {
-        matches!(limit(&mut crate::worksheet::Silent, r.weight, &r.strength), Limit::Weight(w) if w < LEAST_LOAD)
-    });
-    all_routine_low || below_three
-}
-
-/// Least limit of a class; `None` where all of it passes.
-fn least(rated: &[Rated], safe: &[SafeLoad], class: Class) -> Option<Force> {
-    let own = |c: Class| c == class || (c == Class::Own && class == Class::SingleUnit);
-    rated
-        .iter()
-        .zip(safe)
-        .filter(|(r, _)| own(r.class))
-        .filter_map(|(_, s)| match s.limit {
-            Limit::Weight(w) => Some(w),
-            Limit::NotAllowed => Some(LEAST_LOAD),
-            Limit::Full | Limit::NotKnown => None,
-        })
-        .reduce(Force::min)
-}
-
-/// Whole units, rounded down; what is short of a whole one by round-off alone counts as whole.
-#[allow(clippy::cast_possible_truncation, clippy::cast_sign_loss)]
-fn floor_in(unit: WeightUnit, weight: Force) -> u32 {
-    let figure = match unit {
-        WeightUnit::ShortTons => weight.in_short_ton(),
-        WeightUnit::Tonnes => weight.in_tonne(),
+    let w = weight(rec);
+    let (safe, written, shown) = match unit {
+        WeightUnit::ShortTons => {
+            let safe = safe_load_short_tons(rec, w, rf);
+            let written = sign_short_tons(rec, safe);
+            (safe, written, written.q.in_short_ton())
+        }
+        WeightUnit::Tonnes => {
+            let safe = safe_load_tonnes(rec, w, rf);
+            let written = sign_tonnes(rec, safe);
+            (safe, written, written.q.in_tonne())
+        }
     };
-    libm::floor(figure + 1e-9).clamp(0.0, f64::from(u32::MAX)) as u32
+    if under_three_tons(rec, written) {
+        return Sign::NotAllowed(NotAllowed::UnderThreeTons);
+    }
+    // Whole already; rounding only takes off what the conversion of units left behind.
+    Sign::Limit { safe: safe.q, shown: shown.round() as u32, unit }
+}
+
+condition! {
+    fn carried(RF: f64 [One]) { RF >= 1.0 }
+    cite "AASHTO MBE 3rd ed. 6A.8.1" yes "no posting for this vehicle" no "to be posted"
+}
+
+condition! {
+    fn barred(RF: f64 [One]) { RF < 0.3 }
+    cite "AASHTO MBE 3rd ed. 6A.8.3" yes "this type of vehicle is not allowed" no "a safe posting load exists"
+}
+
+condition! {
+    fn under_three_tons(W_sign: Force [ShortTon]) { W_sign < 3.0 }
+    cite "AASHTO MBE 3rd ed. 6A.8.1" yes "less than three tons: not allowed" no "three tons or more"
+}
+
+clause! {
+    /// Safe posting load, for a rating factor from 0.3 to below 1.0.
+    fn safe_load_short_tons(W: Force [ShortTon], RF: f64 [One]) -> W_safe: Force [ShortTon]
+    { W / 0.7 * (RF - 0.3) }
+    cite "AASHTO MBE 3rd ed. (6A.8.3-1)" what "safe posting load"
+}
+
+clause! {
+    /// Safe posting load, for a rating factor from 0.3 to below 1.0.
+    fn safe_load_tonnes(W: Force [Tonne], RF: f64 [One]) -> W_safe: Force [Tonne] { W / 0.7 * (RF - 0.3) }
+    cite "AASHTO MBE 3rd ed. (6A.8.3-1)" what "safe posting load"
+}
+
+clause! {
+    /// Whole short tons, rounded down.
+    fn sign_short_tons(W_safe: Force [ShortTon]) -> W_sign: Force [ShortTon] { floor(W_safe) }
+    cite "rounded down in the unit of the sign" what "weight on the sign"
+}
+
+clause! {
+    /// Whole tonnes, rounded down.
+    fn sign_tonnes(W_safe: Force [Tonne]) -> W_sign: Force [Tonne] { floor(W_safe) }
+    cite "rounded down in the unit of the sign" what "weight on the sign"
 }

@@ -5,7 +5,8 @@ use girderbook_core::quantity::Length;
 use girderbook_core::rating::Rating;
 use girderbook_core::report::diagram::{Curve, curve};
 use girderbook_core::report::names;
-use girderbook_core::report::show::{effect, station};
+use girderbook_core::report::show::effect;
+use girderbook_core::report::verdict::at;
 
 use super::along::{LEFT, RIGHT, place};
 use super::{Canvas, rect, whole};
@@ -18,9 +19,11 @@ const TALL: f64 = 96.0;
 
 /// The drawing; none where nothing governs.
 pub fn node(s: &Scene, rating: &Rating) -> Option<Node> {
+    let check = rating.checks.get(rating.governing?)?;
     let curve = curve(rating, rating.governing?)?;
+    let governs = at(check, s.system());
     let name = rating.lines.get(curve.line).map_or("", |line| line.name.as_str());
-    let at = curve.points.get(curve.at)?;
+    let point = curve.points.get(curve.at)?;
     let show = |value: f64| effect(value, curve.action, s.system());
     let mut canvas = Canvas::new(
         "Asked and carried",
@@ -40,21 +43,20 @@ pub fn node(s: &Scene, rating: &Rating) -> Option<Node> {
         along(&mut canvas, &curve, &x, &y);
     }
     canvas.shape("grid", format!("M{LEFT} {ZERO}H{RIGHT}"));
-    let here = x(at.x);
+    let here = x(point.x);
     let bottom = ZERO + whole(TALL);
     canvas.shape("limit", format!("M{here} {}V{bottom}", ZERO - 8));
     // The words stand on the side with more room.
     let off = if curve.action == Action::Bearing { 30 } else { 8 };
     let (anchor, beside) =
         if here > (LEFT + RIGHT) / 2 { ("end", here - off) } else { ("start", here + off) };
-    canvas.label((beside, ZERO + 22), "strong", anchor, format!("asked {}", show(at.demand)));
-    canvas.label((beside, ZERO + 38), "strong", anchor, format!("carries {}", show(at.capacity)));
-    canvas.label((beside, bottom + 18), "small", anchor, format!("governs at {}", station(at.x, s.system())));
+    canvas.label((beside, ZERO + 22), "strong", anchor, format!("asked {}", show(point.demand)));
+    canvas.label((beside, ZERO + 38), "strong", anchor, format!("carries {}", show(point.capacity)));
+    canvas.label((beside, bottom + 18), "small", anchor, format!("governs: {governs}"));
     let desc = format!(
-        "Demand against capacity of {name}: asked {}, carries {} at {}",
-        show(at.demand),
-        show(at.capacity),
-        station(at.x, s.system())
+        "Demand against capacity of {name}: asked {}, carries {}, {governs}",
+        show(point.demand),
+        show(point.capacity)
     );
     Some(canvas.done(bottom + 28, desc))
 }

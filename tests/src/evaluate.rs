@@ -1,5 +1,4 @@
 //! An evaluator that knows nothing of the program: works printed formulas again with `exmex`.
-#![allow(clippy::disallowed_methods, reason = "it has to be independent of the functions that core uses")]
 
 use exmex::BinOp;
 use exmex::prelude::*;

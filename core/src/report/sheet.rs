@@ -142,6 +142,11 @@ fn row(line: &Line, no: u32, system: System) -> SheetRow {
             row.numbers.clone_from(place);
             row.cite.clone_from(cite);
         }
+        Kind::Sum { rows } if rows.is_empty() => {
+            row.from = From::Sum;
+            row.formula = "nothing entered".to_owned();
+            row.numbers = "0".to_owned();
+        }
         Kind::Sum { rows } => {
             row.from = From::Sum;
             let words: Vec<&str> = rows.iter().map(|part| part.what.as_str()).collect();

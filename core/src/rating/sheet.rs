@@ -76,7 +76,7 @@ fn check<B: Basis>(
     let at = At::new(bridge, key.line, key.x);
     let resistance = basis.capacity(sheet, &at, &dead, key.action, key.state)?;
     let moduli = match key.action {
-        Action::Stress => Some(basis.moduli(&mut crate::worksheet::Silent, &at)?),
+        Action::Stress => Some(basis.moduli(sheet, &at)?),
         Action::Moment | Action::Shear | Action::Bearing => None,
     };
     sheet.heading("Load factors");

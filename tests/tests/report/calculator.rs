@@ -196,7 +196,7 @@ impl Reader<'_> {
         if self.take("π") {
             return Ok(Interval { low: core::f64::consts::PI, high: core::f64::consts::PI });
         }
-        for function in ["max", "min", "√", "tan", ""] {
+        for function in ["max", "min", "floor", "√", "tan", ""] {
             if self.take(&format!("{function}(")) {
                 let mut arguments = vec![self.sum()?];
                 while self.take(",") {
@@ -215,6 +215,7 @@ impl Reader<'_> {
                 return Ok(match function {
                     "max" => fold(f64::max),
                     "min" => fold(f64::min),
+                    "floor" => Interval { low: first.low.floor(), high: first.high.floor() },
                     "√" => Interval { low: first.low.sqrt(), high: first.high.sqrt() },
                     "tan" => Interval {
                         low: libm::tan(first.low.to_radians()),

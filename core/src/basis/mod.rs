@@ -151,7 +151,12 @@ impl<'a> At<'a> {
     /// Whether both places are on one line, with the same plates left.
     #[must_use]
     pub fn same_plates(&self, other: &Self) -> bool {
-        self.line == other.line && self.left == other.left
+        let crooked = |at: &Self| at.bridge.crooked_web_at(at.line, at.x).map(|f| (f.id.clone(), f.straight));
+        let measured = |at: &Self| at.bridge.loss_measured_at(at.line, at.x);
+        self.line == other.line
+            && self.left == other.left
+            && crooked(self) == crooked(other)
+            && measured(self) == measured(other)
     }
 
     /// The girder, if the member is of steel.

@@ -55,6 +55,14 @@ clause! {
     cite "AASHTO LRFD 9th ed. D6.5.1" what "factored resistance"
 }
 
+clause! {
+    /// The formulas of LRFD do not fall steadily as plates get thinner (a thinner tension flange can
+    /// raise `M_n` by 10 % and more), but losing steel never makes a girder stronger.
+    pub fn not_above_sound(M_worn: Moment [KipFt], M_sound: Moment [KipFt]) -> M_n: Moment [KipFt]
+    { min(M_worn, M_sound) }
+    cite "mechanics" what "nominal flexural resistance, not above that of the sound section"
+}
+
 /// Capacity for an action.
 pub fn capacity<R: Recorder>(
     rec: &mut R,
@@ -70,11 +78,19 @@ pub fn capacity<R: Recorder>(
     let f_y = rec.given("F_y", "yield strength", entry, Ksi);
     match action {
         Action::Moment => {
-            let nominal = if girder.composite == Connectors::Proved {
-                composite_moment(rec, at, &section, f_y, dead)?
-            } else {
-                bare_moment(rec, settings, at, &section, f_y)?
+            let moment = |rec: &mut R, section: &Effective<'_>| {
+                if girder.composite == Connectors::Proved {
+                    composite_moment(rec, at, section, f_y, dead)
+                } else {
+                    bare_moment(rec, settings, at, section, f_y)
+                }
             };
+            let mut nominal = moment(rec, &section)?;
+            if section.sound.is_some() {
+                let sound = Effective::at(rec, &girder.section, &Remains::default())?;
+                let sound = moment(rec, &sound)?;
+                nominal = not_above_sound(rec, nominal, sound);
+            }
             let phi = phi::flexure(rec);
             let factors = on(rec, settings, at, action)?;
             let phi = overridden(rec, at.bridge, "phi", phi);

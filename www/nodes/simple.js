@@ -41,11 +41,14 @@ export function group() {
 /** @param {TreeNode} _node @param {Hands} hands @returns {Mounted} */
 export function button(_node, hands) {
   let action = '';
-  const element = make('button', { type: 'button' });
+  const element = make('button', { type: 'button', disabled: '' });
   element.addEventListener('click', () => hands.act(action));
   const set = (/** @type {string} */ name, /** @type {string} */ value) => {
     if (name === 'text') element.textContent = value;
-    if (name === 'act') action = value;
+    if (name === 'act') {
+      action = value;
+      element.disabled = !value;
+    }
     if (name === 'tone') element.className = value;
   };
   return { element, set };

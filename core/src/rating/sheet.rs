@@ -154,9 +154,10 @@ fn axles(
     let moment = matches!(key.action, Action::Moment | Action::Stress);
     let cite = case.trains[train].source().to_owned();
     let (mut moments, mut forces) = (Vec::new(), Vec::new());
-    for axle in &governing.axles_on {
-        let number = axle.axle + 1;
-        let p = sheet.look_up("P", "axle load", axle.load, Kip, &cite, || format!("axle {number} of {name}"));
+    let names: Vec<String> =
+        governing.axles_on.iter().map(|axle| format!("axle {}", axle.axle + 1)).collect();
+    for (axle, called) in governing.axles_on.iter().zip(&names) {
+        let p = sheet.look_up("P", "axle load", axle.load, Kip, &cite, || format!("{called} of {name}"));
         let place = axle.place;
         let how = || format!("axle at {:.3} ft of {:.3} ft", place.in_ft(), span.in_ft());
         if moment {
@@ -168,7 +169,7 @@ fn axles(
                 0.0,
                 how,
             );
-            moments.push(("axle", axle_moment(sheet, p, eta)));
+            moments.push((called.as_str(), axle_moment(sheet, p, eta)));
         } else {
             let eta = sheet.found(
                 "eta",
@@ -178,7 +179,7 @@ fn axles(
                 0.0,
                 how,
             );
-            forces.push(("axle", axle_force(sheet, p, eta)));
+            forces.push((called.as_str(), axle_force(sheet, p, eta)));
         }
     }
     if moment {
